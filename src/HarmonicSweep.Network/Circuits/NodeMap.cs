@@ -52,36 +52,3 @@ public sealed class NodeMap
     /// <summary>Buses merged into a node, in table order.</summary>
     public IReadOnlyList<string> BusesOf(int node) => _buses[node];
 }
-
-/// <summary>Disjoint sets with path halving (Tarjan and van Leeuwen 1984).</summary>
-internal sealed class DisjointSets
-{
-    private readonly int[] _parent;
-
-    public DisjointSets(int count)
-    {
-        _parent = new int[count];
-        for (int i = 0; i < count; i++)
-        {
-            _parent[i] = i;
-        }
-    }
-
-    public int Find(int item)
-    {
-        while (_parent[item] != item)
-        {
-            _parent[item] = _parent[_parent[item]];
-            item = _parent[item];
-        }
-
-        return item;
-    }
-
-    public void Join(int a, int b)
-    {
-        int rootA = Find(a);
-        int rootB = Find(b);
-        _parent[Math.Max(rootA, rootB)] = Math.Min(rootA, rootB);
-    }
-}
