@@ -65,6 +65,6 @@ public static class ScreenStudy
             .Select(g => new PositionMap(
                 g.Key.BaseState, g.Key.Name, g.First().Job.Moved[0].Bank.Bus, g.Key.Strength,
                 [.. g.Select(s => s.Job.Moved[0].Steps)], g.First().MapOrders, [.. g.Select(s => s.MapOhm)],
-                [.. g.SelectMany(s => s.InjectedOrders).Distinct().Order()])),
+                [.. g.SelectMany(s => s.Injected).Distinct().Order()])),
     ];
 }

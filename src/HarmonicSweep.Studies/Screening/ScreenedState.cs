@@ -18,7 +18,7 @@ internal sealed record ScreenedState
     /// <summary>Per bus: THD (order null, percent of V_1) and each solved order above 1 (percent of nominal).</summary>
     public required IReadOnlyList<(string Bus, double? Order, double Percent)> BusPercent { get; init; }
 
-    public required IReadOnlyList<double> InjectedOrders { get; init; }
+    public required IReadOnlyList<double> Injected { get; init; }
 
     public required IReadOnlyList<double> MapOrders { get; init; }
 
@@ -41,7 +41,7 @@ internal sealed record ScreenedState
             Name = job.State.Name,
             Positions = [.. job.Moved.Select(m => Position(job, request, solution, resonances, m.Bank, m.Steps))],
             BusPercent = Percentages(request, solution),
-            InjectedOrders = injected,
+            Injected = injected,
             MapOrders = mapOrders,
             MapOhm = Curve(circuit, buses[0], mapOrders, cancellation),
         };
