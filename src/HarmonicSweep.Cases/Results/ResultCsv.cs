@@ -37,7 +37,7 @@ public static class ResultCsv
 }
 
 /// <summary>Parts of complex values in tables.</summary>
-internal static class CsvComplex
+public static class CsvComplex
 {
     /// <summary>Angle in degrees.</summary>
     public static double Degrees(this Complex value) => value.Phase * 180 / Math.PI;

@@ -1,0 +1,65 @@
+using HarmonicSweep.Cases;
+using HarmonicSweep.Cases.Results;
+using HarmonicSweep.Studies;
+using static System.FormattableString;
+
+namespace HarmonicSweep.Cli;
+
+/// <summary>Hands a result over: to stdout in the format asked for, or to a folder with a summary on stdout.</summary>
+internal sealed class ResultOutput(CaseFile caseFile, StudyRequest request, StudyResult result, string command)
+{
+    /// <summary>Prints the result.</summary>
+    public void Print(TextWriter writer, OutputFormat format)
+    {
+        switch (format)
+        {
+            case OutputFormat.Json:
+                using (var stream = new TextWriterStream(writer))
+                {
+                    ResultJson.Write(stream, caseFile, result, HsweepCommand.Version);
+                }
+
+                writer.Write('\n');
+                break;
+            case OutputFormat.Csv:
+                PrintCsv(writer);
+                break;
+            default:
+                TextReport.Write(writer, View());
+                break;
+        }
+    }
+
+    /// <summary>Writes every file of the result, then its summary and the names of the files to stdout.</summary>
+    public void Store(ResultFolder target, string folder, TextWriter writer, Action<CaseFile, StudyResult, string> drawPlots)
+    {
+        target.WriteTables(caseFile, result);
+        target.WriteText("summary.txt", text => TextReport.Write(text, View()));
+        drawPlots(caseFile, result, target.StagingFolder);
+        IReadOnlyList<string> files = target.Commit(caseFile, result, HsweepCommand.Version);
+        Headline.Write(writer, View());
+        writer.WriteLine();
+        IEnumerable<string> kinds = files.GroupBy(f => Path.GetExtension(f).TrimStart('.'), StringComparer.Ordinal)
+            .OrderBy(g => g.Key, StringComparer.Ordinal)
+            .Select(g => Invariant($"{g.Count()} {g.Key}"));
+        writer.WriteLine(Invariant($"Wrote {files.Count} files to {folder} ({string.Join(", ", kinds)}); start with summary.txt."));
+    }
+
+    private ReportView View() => new(caseFile, request, result, command);
+
+    private void PrintCsv(TextWriter writer)
+    {
+        bool first = true;
+        foreach (CsvTable table in ResultCsv.Tables(caseFile, result))
+        {
+            if (!first)
+            {
+                writer.Write('\n');
+            }
+
+            first = false;
+            writer.Write($"# {table.Title}\n");
+            table.Write(writer);
+        }
+    }
+}
