@@ -7,6 +7,11 @@ namespace HarmonicSweep.Cli;
 /// <summary>A study as a command runs it.</summary>
 internal delegate StudyResult RunStudy(StudyRequest request, IProgress<double>? progress, CancellationToken cancellation);
 
+/// <summary>Draws the plots of a result into a folder, each as PNG and SVG.</summary>
+/// <returns>What a reader of the plots must know.</returns>
+internal delegate IReadOnlyList<Finding> DrawPlots(
+    CaseFile caseFile, StudyResult result, string folder, int threads, CancellationToken cancellation);
+
 /// <summary>What the commands call. Every member is a method of its own, so that help loads none of their libraries.</summary>
 internal sealed partial record Workshop
 {
@@ -16,8 +21,8 @@ internal sealed partial record Workshop
     /// <summary>Writes the tables of a new case; the finding says why it was refused.</summary>
     public required Func<string, Finding?> NewCase { get; init; }
 
-    /// <summary>Draws the plots of a result into a folder.</summary>
-    public required Action<CaseFile, StudyResult, string> DrawPlots { get; init; }
+    /// <summary>Draws the plots of a result.</summary>
+    public required DrawPlots DrawPlots { get; init; }
 
     /// <summary>Builds every state and solves its power flow.</summary>
     public required RunStudy Check { get; init; }

@@ -60,7 +60,7 @@ internal sealed class CaseRun(CaseCommand command, CommandOptions options, Parse
         }
         else
         {
-            output.Store(target, _out!, terminal.Out, workshop.DrawPlots);
+            Diagnostics.Write(terminal, output.Store(target, _out!, terminal.Out, workshop.DrawPlots, cancellation));
         }
 
         return result.LimitExceeded ? ExitCode.LimitExceeded : ExitCode.Ok;

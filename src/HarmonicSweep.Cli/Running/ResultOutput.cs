@@ -1,5 +1,6 @@
 using HarmonicSweep.Cases;
 using HarmonicSweep.Cases.Results;
+using HarmonicSweep.Network;
 using HarmonicSweep.Studies;
 using static System.FormattableString;
 
@@ -30,12 +31,14 @@ internal sealed class ResultOutput(CaseFile caseFile, StudyRequest request, Stud
         }
     }
 
-    /// <summary>Writes every file of the result, then its summary and the names of the files to stdout.</summary>
-    public void Store(ResultFolder target, string folder, TextWriter writer, Action<CaseFile, StudyResult, string> drawPlots)
+    /// <summary>Writes every file of the result, then its summary and the number of files to stdout.</summary>
+    /// <returns>What a reader of the plots must know.</returns>
+    public IReadOnlyList<Finding> Store(ResultFolder target, string folder, TextWriter writer, DrawPlots drawPlots, CancellationToken cancellation)
     {
         target.WriteTables(caseFile, result);
         target.WriteText("summary.txt", text => TextReport.Write(text, View()));
-        drawPlots(caseFile, result, target.StagingFolder);
+        IReadOnlyList<Finding> remarks = drawPlots(caseFile, result, target.StagingFolder, request.Threads, cancellation);
+        cancellation.ThrowIfCancellationRequested();
         IReadOnlyList<string> files = target.Commit(caseFile, result, HsweepCommand.Version);
         Headline.Write(writer, View());
         writer.WriteLine();
@@ -43,6 +46,7 @@ internal sealed class ResultOutput(CaseFile caseFile, StudyRequest request, Stud
             .OrderBy(g => g.Key, StringComparer.Ordinal)
             .Select(g => Invariant($"{g.Count()} {g.Key}"));
         writer.WriteLine(Invariant($"Wrote {files.Count} files to {folder} ({string.Join(", ", kinds)}); start with summary.txt."));
+        return remarks;
     }
 
     private ReportView View() => new(caseFile, request, result, command);

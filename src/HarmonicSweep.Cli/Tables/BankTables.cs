@@ -14,26 +14,27 @@ internal static class BankTables
         }
 
         // a command of its own shows the step map in the order of the steps; the main job only what must be avoided
-        IReadOnlyList<BankPosition> shown = view.IsStudy ? view.DoNotDwell() : screen.Positions;
+        IReadOnlyList<BankPosition> shown = view.IsStudy ? view.BadPositions() : screen.Positions;
         TextTable.Write(
-            writer, view.IsStudy ? "Bank positions not to dwell on" : "Bank positions", shown, view.IsStudy ? view.RowLimit : 200,
-            new("position", p => p.State, Left: true),
-            new("in [kvar]", p => Format.Number(p.KvarIn)),
-            new("by hand", p => Format.Number(p.HandOrder)),
-            new("resonance", p => Format.Number(p.Nearest?.Order)),
-            new("injected", p => Format.GivenOrder(p.Nearest?.NearestInjectedOrder)),
-            new("apart", p => Format.Number(p.Nearest?.Distance, 2)),
-            new("THD [%]", p => Format.Percent(p.ThdPercent)),
-            new("U rms [%]", p => Format.Number(p.Loading?.RmsVoltagePercent)),
-            new("crest [%]", p => Format.Number(p.Loading?.CrestVoltagePercent)),
-            new("I rms [%]", p => Format.Number(p.Loading?.CurrentPercent)),
-            new("kvar [%]", p => Format.Number(p.Loading?.KvarPercent)),
-            new("PCC PF", p => Format.Number(p.PccPowerFactor, 3)),
-            new("bus V [%]", p => Format.Number(p.BusVoltagePercent)),
-            new("", Mark, Left: true));
+            writer, view.IsStudy ? "Bank positions not to dwell on, or beyond what the capacitors may carry" : "Bank positions",
+            shown, view.IsStudy ? view.RowLimit : int.MaxValue,
+            [
+                new("position", p => p.State, Left: true),
+                new("kvar in", p => Format.Number(p.KvarIn)),
+                new("by hand", p => Format.Number(p.HandOrder)),
+                new("resonance", p => Format.Number(p.Nearest?.Order)),
+                new("injected", p => Format.GivenOrder(p.Nearest?.NearestInjectedOrder)),
+                new("THD [%]", p => Format.Percent(p.ThdPercent)),
+                new("U [%]", p => Format.Number(p.Loading?.RmsVoltagePercent)),
+                new("crest [%]", p => Format.Number(p.Loading?.CrestVoltagePercent)),
+                new("I [%]", p => Format.Number(p.Loading?.CurrentPercent)),
+                new("kvar [%]", p => Format.Number(p.Loading?.KvarPercent)),
+                .. view.IsStudy ? [] : Operation(),
+                new("", Mark, Left: true),
+            ]);
         if (shown.Count > 0)
         {
-            writer.WriteLine("  resonance, injected, apart: orders. U rms to kvar: capacitors against rating; IEEE 18 permits 110, 120, 135, 135 % at most.");
+            writer.WriteLine("  by hand, resonance, injected: orders. U, crest, I, kvar: of the capacitors, percent of rated; IEEE 18 permits 110, 120, 135, 135.");
         }
 
         if (view.IsStudy)
@@ -49,6 +50,13 @@ internal static class BankTables
             new("value [%]", w => Format.Percent(w.Percent)),
             new("at position", w => w.State, Left: true));
     }
+
+    /// <summary>What the position does for the plant at the fundamental: the reason to switch it at all.</summary>
+    private static TextColumn<BankPosition>[] Operation() =>
+    [
+        new("PF at PCC", p => Format.Number(p.PccPowerFactor, 3)),
+        new("bus V [%]", p => Format.Number(p.BusVoltagePercent)),
+    ];
 
     private static string Mark(BankPosition position) => (position.DoNotDwell, position.Loading is { Overloaded: true }) switch
     {

@@ -45,6 +45,9 @@ internal static class Format
     /// <summary>A whole number.</summary>
     public static string Count(int value) => value.ToString(CultureInfo.InvariantCulture);
 
+    /// <summary>A number of things: <c>1 value</c>, <c>3 values</c>.</summary>
+    public static string Count(int value, string thing) => $"{Count(value)} {thing}{(value == 1 ? "" : "s")}";
+
     /// <summary>The first few of a list, and how many more there are.</summary>
     public static string Some(IReadOnlyCollection<string> items, int most) => items.Count <= most
         ? string.Join(", ", items)

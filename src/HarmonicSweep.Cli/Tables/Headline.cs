@@ -10,8 +10,8 @@ internal static class Headline
     {
         string[] states = [.. view.Result.States.Select(s => s.State)];
         writer.WriteLine(
-            $"{view.Plant.Title}: {Format.Number(view.Plant.FrequencyHz)} Hz, {Format.Count(view.Plant.Buses.Count)} buses, "
-            + $"{Format.Count(view.Plant.Elements.Count)} elements; {(states.Length == 1 ? "state" : Format.Count(states.Length) + " states:")} {Format.Some(states, 6)}");
+            $"{view.Plant.Title}: {Format.GivenOrder(view.Plant.FrequencyHz)} Hz, {Format.Count(view.Plant.Buses.Count)} buses, "
+            + $"{Format.Count(view.Plant.Elements.Count, "element")}; {(states.Length == 1 ? "state" : Format.Count(states.Length) + " states:")} {Format.Some(states, 6)}");
         Limits(writer, view);
         Banks(writer, view);
         Distortion(writer, view);
@@ -70,7 +70,7 @@ internal static class Headline
         int overloaded = screen.Positions.Count(p => p.Loading is { Overloaded: true });
         if (overloaded > 0)
         {
-            Line(writer, "", $"{Format.Count(overloaded)} positions overload the capacitors themselves");
+            Line(writer, "", $"{Format.Count(overloaded, "position")} beyond what the capacitors themselves may carry");
         }
     }
 
@@ -80,7 +80,7 @@ internal static class Headline
         if (thd.Count > 0 && thd[0].Row.PercentOfFundamental is { } worst)
         {
             int dead = thd.Count(d => d.Row.PercentOfFundamental is null);
-            string not = dead > 0 ? $"; {Format.Count(dead)} values not judged (dead bus)" : "";
+            string not = dead > 0 ? $"; {Format.Count(dead, "value")} not judged (dead bus)" : "";
             Line(
                 writer, "Distortion",
                 $"highest THD {Format.Percent(worst)} % of V_1 at {thd[0].Row.Bus}, state {thd[0].State} ({Cases.Results.ResultWords.Word(view.Rule)} sum){not}");
@@ -106,7 +106,7 @@ internal static class Headline
             parts.Add($"{Format.Count(checks.Count(c => c.Agrees))} of {Format.Count(checks.Length)} hand checks agree");
         }
 
-        parts.Add($"{Format.Count(view.Case.Assumed.Count)} values assumed");
+        parts.Add($"{Format.Count(view.Case.Assumed.Count, "value")} assumed");
         if (view.Result.States.Count > 0)
         {
             parts.Add($"worst backward error {Format.Number(view.Result.States.Max(s => s.WorstBackwardError), 2)}");

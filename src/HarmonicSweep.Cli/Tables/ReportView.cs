@@ -47,6 +47,12 @@ internal sealed record ReportView(CaseFile Case, StudyRequest Request, StudyResu
         .. All(s => s.Distortion.Where(d => d.Rule == Rule)).OrderByDescending(d => d.Row.PercentOfFundamental ?? -1),
     ];
 
+    /// <summary>Positions that must not be dwelt on or overload the capacitors, the nearest to an injected order first.</summary>
+    public IReadOnlyList<BankPosition> BadPositions() =>
+    [
+        .. DoNotDwell(), .. (Result.Screen?.Positions ?? []).Where(p => !p.DoNotDwell && p.Loading is { Overloaded: true }),
+    ];
+
     /// <summary>Positions that must not be dwelt on, the nearest to an injected order first.</summary>
     public IReadOnlyList<BankPosition> DoNotDwell() =>
     [

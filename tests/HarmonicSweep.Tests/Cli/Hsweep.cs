@@ -9,7 +9,7 @@ namespace HarmonicSweep.Tests.Cli;
 /// <summary>Runs command lines through the real entry point with writers in memory and a workshop of sample results.</summary>
 internal sealed class Hsweep
 {
-    private RunStudy _study = (_, _, _) => SampleResult.Result;
+    private RunStudy? _study;
     private (CaseFile? Case, IReadOnlyList<Finding> Findings) _read = (SampleResult.Case, SampleResult.Case.Findings);
 
     /// <summary>Requests the studies were given.</summary>
@@ -43,7 +43,7 @@ internal sealed class Hsweep
     {
         ReadCase = _ => _read,
         NewCase = folder => folder == "taken" ? new Finding(Severity.Error, "HS001", null, "taken is not empty.", "choose another.") : null,
-        DrawPlots = (_, _, folder) => File.WriteAllText(Path.Combine(folder, "sample.svg"), "<svg/>"),
+        DrawPlots = Draw,
         Check = Study("check"),
         Impedance = Study("impedance"),
         Distortion = Study("distortion"),
@@ -54,8 +54,14 @@ internal sealed class Hsweep
     private RunStudy Study(string name) => (request, progress, cancellation) =>
     {
         Asked.Add((name, request));
-        return _study(request, progress, cancellation);
+        return _study is null ? SampleResult.Of(name) : _study(request, progress, cancellation);
     };
+
+    private static IReadOnlyList<Finding> Draw(CaseFile caseFile, StudyResult result, string folder, int threads, CancellationToken cancellation)
+    {
+        File.WriteAllText(Path.Combine(folder, "sample.svg"), "<svg/>");
+        return [];
+    }
 
     /// <summary>What a command line did.</summary>
     internal sealed record Outcome(int Code, string Out, string Error);

@@ -39,6 +39,24 @@ internal static class SampleResult
         Findings = [new Finding(Severity.Note, "HS210", null, "one bus is dead.", "close a coupler.")],
     };
 
+    /// <summary>The parts that one command computes.</summary>
+    public static StudyResult Of(string command)
+    {
+        StateResult start = Base with
+        {
+            Impedance = [], Resonances = [], BankResonances = [], Gains = [], Voltages = [], Distortion = [], Currents = [], Limits = [], HandChecks = [],
+        };
+        StateResult state = command switch
+        {
+            "check" => start with { HandChecks = Base.HandChecks },
+            "impedance" => start with { Impedance = Base.Impedance, Resonances = Base.Resonances, BankResonances = Base.BankResonances, Gains = Base.Gains },
+            "distortion" => start with { Voltages = Base.Voltages, Distortion = Base.Distortion, Currents = Base.Currents, Limits = Base.Limits },
+            "screen" => start with { HandChecks = Base.HandChecks },
+            _ => Base,
+        };
+        return new StudyResult { States = [state], Screen = command is "screen" or "study" ? Screen : null, Findings = Result.Findings };
+    }
+
     private static StateResult Base => new()
     {
         State = "base",
