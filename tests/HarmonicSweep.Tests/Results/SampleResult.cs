@@ -44,7 +44,15 @@ internal static class SampleResult
     {
         StateResult start = Base with
         {
-            Impedance = [], Resonances = [], BankResonances = [], Gains = [], Voltages = [], Distortion = [], Currents = [], Limits = [], HandChecks = [],
+            Impedance = [],
+            Resonances = [],
+            BankResonances = [],
+            Gains = [],
+            Voltages = [],
+            Distortion = [],
+            Currents = [],
+            Limits = [],
+            HandChecks = [],
         };
         StateResult state = command switch
         {
