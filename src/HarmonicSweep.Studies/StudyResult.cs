@@ -151,6 +151,9 @@ public readonly record struct RuleValues(double Phasor, double Arithmetic, doubl
         SummationRule.Rss => Rss,
         _ => Iec,
     };
+
+    /// <summary>Every value times a factor.</summary>
+    public RuleValues Times(double factor) => new(Phasor * factor, Arithmetic * factor, Rss * factor, Iec * factor);
 }
 
 /// <summary>Voltage of a bus at an order.</summary>

@@ -16,19 +16,6 @@ public enum SummationRule
     Iec,
 }
 
-/// <summary>Sequence whose network is seen.</summary>
-public enum Sequence
-{
-    /// <summary>Positive sequence: orders 3k+1 and non-integers.</summary>
-    Positive,
-
-    /// <summary>Negative sequence: orders 3k+2.</summary>
-    Negative,
-
-    /// <summary>Zero sequence: orders 3k.</summary>
-    Zero,
-}
-
 /// <summary>Range and spacing of the listed and plotted points of a scan. Resonances never depend on the spacing.</summary>
 /// <param name="FromHz">First frequency, hertz.</param>
 /// <param name="ToHz">Last frequency, hertz.</param>

@@ -1,0 +1,48 @@
+using System.Numerics;
+using HarmonicSweep.Network;
+using static System.FormattableString;
+
+namespace HarmonicSweep.Studies;
+
+/// <summary>Kirchhoff's current law on the reported currents: their sum at every node against the sum of their magnitudes.</summary>
+internal static class CurrentBalance
+{
+    /// <summary>Beyond this share the run fails.</summary>
+    private const double Bound = 1e-8;
+
+    /// <summary>Largest residual over the nodes of a solved order.</summary>
+    /// <exception cref="ComputationException">The residual is beyond its bound; the finding names bus and order.</exception>
+    public static double Residual(PlantInState plant, NodeMap nodes, SolvedOrder solved)
+    {
+        var sum = new Complex[nodes.Count];
+        double[] magnitude = new double[nodes.Count];
+        foreach (EndCurrent end in solved.Ends)
+        {
+            Complex ampere = Summation.Phasor(end.Ampere);
+            int node = nodes[end.Bus];
+            double kv = plant.Plant.Bus(end.Bus).NominalKv;
+            sum[node] += ampere * kv;
+            magnitude[node] += Complex.Abs(ampere) * kv;
+        }
+
+        // a node that hardly carries anything is measured against the busiest one
+        double floor = magnitude.DefaultIfEmpty(0).Max() * 1e-6;
+        double worst = 0;
+        for (int node = 0; node < nodes.Count; node++)
+        {
+            double scale = Math.Max(magnitude[node], floor);
+            double residual = scale > 0 ? Complex.Abs(sum[node]) / scale : 0;
+            if (!(residual <= Bound))
+            {
+                throw new ComputationException(new Finding(
+                    Severity.Error, "HS303", plant.Plant.Bus(nodes.BusesOf(node)[0]).Location,
+                    Invariant($"state {plant.State.Name}: the currents at bus {nodes.BusesOf(node)[0]} do not sum to zero at order {solved.Order}; the residual is {residual:E2} of their magnitudes, expected at most {Bound:E0}."),
+                    "this is a fault of the computation, not of the case: report the case folder."));
+            }
+
+            worst = Math.Max(worst, residual);
+        }
+
+        return worst;
+    }
+}
