@@ -12,10 +12,14 @@ internal sealed record TwinInjection(ShuntElement Element, double Order, Complex
 /// <summary>Harmonic voltages and currents of a plant in a state, one phasor a source.</summary>
 internal sealed class TwinDistortion
 {
+    /// <summary>Relative floor of a fundamental voltage: each side iterates to its own last digits.</summary>
+    private const double FundamentalNoise = 1e-14;
+
     private readonly PlantInState _state;
     private readonly Dictionary<(string Bus, double Order), Complex[]> _volt = [];
     private readonly Dictionary<(string Element, string Bus, double Order), Complex[]> _ampere = [];
     private readonly Dictionary<(string Bus, double Order), double> _rounding = [];
+    private readonly Dictionary<(string Element, string Bus, double Order), double> _ampereRounding = [];
 
     public TwinDistortion(PlantInState state)
     {
@@ -58,6 +62,9 @@ internal sealed class TwinDistortion
     /// <summary>How far the phasor sum at a bus may move by rounding of the stamps alone, volts.</summary>
     public double RoundingVolt(string bus, double order) => order == 1 ? 0 : _rounding[(bus, order)];
 
+    /// <summary>How far a current may move by rounding of its own stamps and of the voltages, amperes.</summary>
+    public double RoundingAmpere(string element, string bus, double order) => _ampereRounding.GetValueOrDefault((element, bus, order));
+
     /// <summary>THD of voltage, percent of V_1; null on a dead bus.</summary>
     public double? ThdPercent(string bus, Func<double, Complex[], double> rule) => Flow.IsLive(bus)
         ? 100 * Math.Sqrt(Orders.Where(h => h == Math.Floor(h) && h is >= 2 and <= 50).Sum(h => Math.Pow(rule(h, Volt(bus, h)), 2)))
@@ -86,7 +93,7 @@ internal sealed class TwinDistortion
 
     private IEnumerable<TwinInjection> Injections()
     {
-        foreach (Converter converter in _state.Plant.Of<Converter>().Where(c => _state.IsIn(c) && Flow.IsLive(c.Bus)))
+        foreach (Converter converter in _state.Plant.Of<Converter>().Where(c => _state.IsIn(c) && Flow.DrawnAmpere(c) != Complex.Zero))
         {
             foreach (SpectrumLine line in converter.Spectrum.Lines.Where(l => TwinOrder.Snap(l.Order) != 1))
             {
@@ -118,6 +125,7 @@ internal sealed class TwinDistortion
                 }
 
                 _ampere[(part.Name, part.Buses[i], 1)] = [sum];
+                _ampereRounding[(part.Name, part.Buses[i], 1)] = TermSum(part, i, b => FundamentalNoise * Flow.Volt(b).Magnitude);
             }
         }
 
@@ -163,6 +171,7 @@ internal sealed class TwinDistortion
             {
                 _ampere[(part.Name, part.Buses[i], order)] =
                     [.. sources.Select((source, s) => PartCurrent(part, i, nodes, solved[s]) - OwnEmf(part, source))];
+                _ampereRounding[(part.Name, part.Buses[i], order)] = TermSum(part, i, b => _rounding[(b, order)]);
             }
         }
 
@@ -172,6 +181,9 @@ internal sealed class TwinDistortion
                 [.. sources.Select(s => ReferenceEquals(s.Element, converter) ? -s.Ampere : Complex.Zero)];
         }
     }
+
+    private static double TermSum(TwinPart part, int end, Func<string, double> volt) =>
+        Enumerable.Range(0, part.Buses.Count).Sum(k => part.Y[end, k].Magnitude * volt(part.Buses[k]));
 
     private static Complex PartCurrent(TwinPart part, int end, TwinNodes nodes, Complex[] v)
     {

@@ -1,6 +1,7 @@
 using System.Numerics;
 using MathNet.Numerics.LinearAlgebra;
 using MathNet.Numerics.LinearAlgebra.Complex;
+using RealVector = MathNet.Numerics.LinearAlgebra.Vector<double>;
 
 namespace HarmonicSweep.Tests.Twin;
 
@@ -15,6 +16,7 @@ internal sealed class TwinMatrix
 
     private readonly List<int> _groundedNodes;
     private readonly Matrix<Complex> _inverse;
+    private readonly Lazy<Matrix<double>> _rounding;
 
     public TwinMatrix(TwinNodes nodes, IReadOnlyList<TwinPart> parts)
     {
@@ -39,6 +41,7 @@ internal sealed class TwinMatrix
         HashSet<int> grounded = [.. parts.Where(p => p.TiesToGround).SelectMany(p => p.Buses).Select(b => island[nodes.Of(b)])];
         _groundedNodes = [.. Enumerable.Range(0, nodes.Count).Where(n => grounded.Contains(island[n]))];
         _inverse = Invert();
+        _rounding = new Lazy<Matrix<double>>(() => MachineEpsilon * Magnitudes(_inverse) * GroundedScale() * Magnitudes(_inverse));
     }
 
     /// <summary>Node numbering.</summary>
@@ -80,51 +83,35 @@ internal sealed class TwinMatrix
     /// How far Z may move when every stamp is off by one rounding: |Z| |Y| |Z| eps, entry by entry
     /// (first-order perturbation theory; dZ = -Z dY Z).
     /// </summary>
-    public double RoundingOhm(string at, string from)
-    {
-        int n = _groundedNodes.Count;
-        int i = _groundedNodes.IndexOf(Nodes.Of(at));
-        int k = _groundedNodes.IndexOf(Nodes.Of(from));
-        double sum = 0;
-        for (int a = 0; a < n; a++)
-        {
-            for (int b = 0; b < n; b++)
-            {
-                sum += _inverse[i, a].Magnitude * Scale[_groundedNodes[a], _groundedNodes[b]] * _inverse[b, k].Magnitude;
-            }
-        }
-
-        return sum * MachineEpsilon;
-    }
+    public double RoundingOhm(string at, string from) =>
+        _rounding.Value[_groundedNodes.IndexOf(Nodes.Of(at)), _groundedNodes.IndexOf(Nodes.Of(from))];
 
     /// <summary>How far each node voltage may move when every stamp is off by one rounding: |Z| |Y| |V| eps.</summary>
     public double[] RoundingVolt(Complex[] voltages)
     {
+        RealVector magnitude = RealVector.Build.Dense(_groundedNodes.Count, i => voltages[_groundedNodes[i]].Magnitude);
+        RealVector move = MachineEpsilon * (Magnitudes(_inverse) * (GroundedScale() * magnitude));
         var bound = new double[Nodes.Count];
-        int n = _groundedNodes.Count;
-        for (int i = 0; i < n; i++)
+        for (int i = 0; i < _groundedNodes.Count; i++)
         {
-            for (int a = 0; a < n; a++)
-            {
-                double current = 0;
-                for (int b = 0; b < n; b++)
-                {
-                    current += Scale[_groundedNodes[a], _groundedNodes[b]] * voltages[_groundedNodes[b]].Magnitude;
-                }
-
-                bound[_groundedNodes[i]] += _inverse[i, a].Magnitude * current * MachineEpsilon;
-            }
+            bound[_groundedNodes[i]] = move[i];
         }
 
         return bound;
     }
+
+    private static Matrix<double> Magnitudes(Matrix<Complex> matrix) =>
+        Matrix<double>.Build.Dense(matrix.RowCount, matrix.ColumnCount, (i, k) => matrix[i, k].Magnitude);
+
+    private Matrix<double> GroundedScale() => Matrix<double>.Build.Dense(
+        _groundedNodes.Count, _groundedNodes.Count, (i, k) => Scale[_groundedNodes[i], _groundedNodes[k]]);
 
     private Matrix<Complex> Invert()
     {
         int n = _groundedNodes.Count;
         if (n == 0)
         {
-            return new DenseMatrix(1);
+            return Y;
         }
 
         Matrix<Complex> y = DenseMatrix.Create(n, n, (i, k) => Y[_groundedNodes[i], _groundedNodes[k]]);

@@ -7,10 +7,13 @@ namespace HarmonicSweep.Tests.Twin;
 /// <summary>
 /// Newton's method with a dense Jacobian in rectangular coordinates, all islands at once, on volts and volt-amperes.
 /// Unknowns are real and imaginary part of every live node; a generator that holds an island replaces both its
-/// equations by V = given, one beside a supply replaces the reactive balance by |V| = given.
+/// equations by V = given, one beside a supply replaces the reactive balance by |V| = given. Loads and machines are
+/// raised in steps from the network without load, so that the solution is the one a plant would come to.
 /// </summary>
 internal sealed class TwinPowerFlow
 {
+    private const int LoadSteps = 20;
+
     private readonly PlantInState _state;
     private readonly TwinNodes _nodes;
     private readonly Complex[,] _y;
@@ -20,6 +23,7 @@ internal sealed class TwinPowerFlow
     private readonly Dictionary<int, Generator> _holds = [];
     private readonly Dictionary<int, Generator> _regulates = [];
     private readonly Complex[] _v;
+    private double _loadShare = 1;
 
     private TwinPowerFlow(PlantInState state, TwinNodes nodes)
     {
@@ -58,12 +62,25 @@ internal sealed class TwinPowerFlow
     /// <summary>False when Newton's method did not settle.</summary>
     public bool Converged { get; private set; }
 
+    /// <summary>
+    /// Converged with every live voltage between 70 and 115 % of nominal. Outside, near collapse or a resonance at the
+    /// fundamental, several solutions lie close together and two programs may rightly settle on different ones.
+    /// </summary>
+    public bool IsPlain => Converged && _state.Plant.Buses.All(b => !IsLive(b.Name)
+        || Volt(b.Name).Magnitude / PhaseVolt(b.Name) is > 0.7 and < 1.15);
+
     /// <summary>Solves; look at <see cref="Converged"/> before using the voltages.</summary>
     public static TwinPowerFlow Solve(PlantInState state)
     {
         TwinPowerFlow flow = new(state, new TwinNodes(state));
         flow.Start();
-        flow.Iterate();
+        for (int step = 1; step <= LoadSteps; step++)
+        {
+            flow._loadShare = (double)step / LoadSteps;
+            flow.Converged = false;
+            flow.Iterate();
+        }
+
         return flow;
     }
 
@@ -217,11 +234,11 @@ internal sealed class TwinPowerFlow
             return [difference.Real, difference.Imaginary];
         }
 
-        Complex leaving = 3 * _v[node] * Complex.Conjugate(NodeCurrent(node)) + _draw[node];
+        Complex leaving = 3 * _v[node] * Complex.Conjugate(NodeCurrent(node)) + _loadShare * _draw[node];
         if (_regulates.TryGetValue(node, out Generator? generator))
         {
             double target = generator.VoltagePu * PhaseVolt(generator.Bus);
-            return [leaving.Real - 1e6 * generator.PMw, _v[node].Magnitude * _v[node].Magnitude - target * target];
+            return [leaving.Real - _loadShare * 1e6 * generator.PMw, _v[node].Magnitude * _v[node].Magnitude - target * target];
         }
 
         return [leaving.Real, leaving.Imaginary];
