@@ -32,6 +32,26 @@ internal static class StateFindings
                     state.State);
             }
 
+            foreach (string bus in state.OpenBuses)
+            {
+                Say(
+                    new Finding(
+                        Severity.Warning, "HS213", request.Plant.Bus(bus).Location,
+                        $"bus {bus} has no path to ground in the harmonic network: its impedance is open",
+                        "nothing needs mending if it is meant to stand isolated; else close what connects it."),
+                    state.State);
+            }
+
+            foreach (string coupler in state.LoopCouplers)
+            {
+                Say(
+                    new Finding(
+                        Severity.Note, "HS214", request.Plant.FindElement(coupler)!.Location,
+                        $"coupler {coupler} closes a loop of closed couplers: it changes nothing, and how the current shares in such a loop is not determined",
+                        "nothing needs mending."),
+                    state.State);
+            }
+
             foreach (IGrouping<string, DroppedInjection> byElement in state.DroppedInjections.GroupBy(d => d.Element))
             {
                 string orders = string.Join(", ", byElement.Select(d => Invariant($"{d.Order}")));

@@ -32,6 +32,12 @@ public sealed record StateResult
     /// <summary>Buses not tied to a source in service.</summary>
     public IReadOnlyList<string> DeadBuses { get; init; } = [];
 
+    /// <summary>Buses without a path to ground in the harmonic network: their impedance is open.</summary>
+    public IReadOnlyList<string> OpenBuses { get; init; } = [];
+
+    /// <summary>Closed couplers that close a loop of couplers.</summary>
+    public IReadOnlyList<string> LoopCouplers { get; init; } = [];
+
     /// <summary>Injections that were not solved, and why.</summary>
     public IReadOnlyList<DroppedInjection> DroppedInjections { get; init; } = [];
 

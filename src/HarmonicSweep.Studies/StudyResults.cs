@@ -29,17 +29,23 @@ internal static class StudyResults
 /// <summary>What is known of a state once its power flow is solved.</summary>
 internal static class StateResults
 {
-    /// <summary>Fundamental voltages, dead buses, injected orders and hand checks.</summary>
-    public static StateResult Start(PlantInState plant, PowerFlowSolution powerFlow) => new()
+    /// <summary>Fundamental voltages, dead and open buses, injected orders and hand checks.</summary>
+    public static StateResult Start(PlantInState plant, PowerFlowSolution powerFlow)
     {
-        State = plant.State.Name,
-        PowerFlow =
-        [
-            .. plant.Plant.Buses.Where(b => powerFlow.IsLive(b.Name)).Select(b => new BusVoltage(b.Name, powerFlow.VoltageKv(b.Name))),
-        ],
-        DeadBuses = powerFlow.DeadBuses,
-        InjectedOrders = InjectedOrders.Of(plant, powerFlow),
-        DroppedInjections = DroppedInjections.Of(plant, powerFlow),
-        HandChecks = HandChecks.Of(plant, powerFlow),
-    };
+        Circuit circuit = Circuit.Build(plant, CircuitScope.Harmonic);
+        return new StateResult
+        {
+            State = plant.State.Name,
+            PowerFlow =
+            [
+                .. plant.Plant.Buses.Where(b => powerFlow.IsLive(b.Name)).Select(b => new BusVoltage(b.Name, powerFlow.VoltageKv(b.Name))),
+            ],
+            DeadBuses = powerFlow.DeadBuses,
+            OpenBuses = [.. plant.Plant.Buses.Select(b => b.Name).Where(b => circuit.RowOf(b) < 0)],
+            LoopCouplers = circuit.Nodes.LoopCouplers,
+            InjectedOrders = InjectedOrders.Of(plant, powerFlow),
+            DroppedInjections = DroppedInjections.Of(plant, powerFlow),
+            HandChecks = HandChecks.Of(plant, powerFlow),
+        };
+    }
 }

@@ -8,6 +8,7 @@ public sealed class NodeMap
 {
     private readonly Dictionary<string, int> _nodeByBus = new(StringComparer.Ordinal);
     private readonly List<List<string>> _buses = [];
+    private readonly List<string> _loopCouplers = [];
 
     /// <summary>Merges the buses of a plant in a state; nodes are numbered by their first bus in table order.</summary>
     public NodeMap(PlantInState plant)
@@ -21,10 +22,17 @@ public sealed class NodeMap
 
         foreach (Coupler coupler in plant.Plant.Of<Coupler>())
         {
-            if (plant.IsIn(coupler))
+            if (!plant.IsIn(coupler))
             {
-                sets.Join(index[coupler.EndA], index[coupler.EndB]);
+                continue;
             }
+
+            if (sets.Find(index[coupler.EndA]) == sets.Find(index[coupler.EndB]))
+            {
+                _loopCouplers.Add(coupler.Name);
+            }
+
+            sets.Join(index[coupler.EndA], index[coupler.EndB]);
         }
 
         var nodeByRoot = new Dictionary<int, int>();
@@ -45,6 +53,9 @@ public sealed class NodeMap
 
     /// <summary>Number of nodes.</summary>
     public int Count => _buses.Count;
+
+    /// <summary>Closed couplers whose ends other couplers already join: they change nothing, and the current in such a loop is not determined.</summary>
+    public IReadOnlyList<string> LoopCouplers => _loopCouplers;
 
     /// <summary>Node of a bus.</summary>
     public int this[string bus] => _nodeByBus[bus];

@@ -58,7 +58,18 @@ public sealed class PowerFlow
 
     private PowerFlowSolution Solve()
     {
-        _voltage = new PowerFlowStart(_circuit, _nodes, _admittance, _norton).Voltages();
+        try
+        {
+            _voltage = new PowerFlowStart(_circuit, _nodes, _admittance, _norton).Voltages();
+        }
+        catch (SingularMatrixException exception)
+        {
+            throw new ComputationException(new Finding(
+                Severity.Error, "HS304", _circuit.Plant.Plant.Bus(_circuit.Nodes.BusesOf(exception.Row)[0]).Location,
+                $"state {_circuit.Plant.State.Name}: the network cannot be solved at the fundamental near bus {_circuit.NameOfRow(exception.Row)}; its nodal matrix is singular.",
+                "a resonance without losses lies exactly on the fundamental: check the reactances there."));
+        }
+
         Complex[] mismatch = Mismatch(_voltage);
         double error = Largest(mismatch);
         int iteration = 0;

@@ -25,8 +25,9 @@ internal static class CurrentBalance
             magnitude[node] += Complex.Abs(ampere) * kv;
         }
 
-        // a node that hardly carries anything is measured against the busiest one
-        double floor = magnitude.DefaultIfEmpty(0).Max() * 1e-6;
+        // a node that hardly carries anything is measured against the busiest one, so that the bound there is 1e-10 of the
+        // largest power: what the power flow is held to
+        double floor = magnitude.DefaultIfEmpty(0).Max() * 0.01;
         double worst = 0;
         for (int node = 0; node < nodes.Count; node++)
         {

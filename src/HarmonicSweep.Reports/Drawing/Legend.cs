@@ -1,0 +1,90 @@
+namespace HarmonicSweep.Reports.Drawing;
+
+/// <summary>One entry of a legend.</summary>
+/// <param name="Name">What it stands for; may be shortened in its middle.</param>
+/// <param name="Sample">Draws a sample into a box.</param>
+/// <param name="Details">Further words; as many as have room are shown.</param>
+internal sealed record LegendEntry(string Name, Action<Sheet, Box>? Sample, params string[] Details)
+{
+    /// <summary>A line with the mark of its series.</summary>
+    public static LegendEntry Line(string name, SeriesLook look, params string[] details) => new(name, (sheet, box) =>
+    {
+        double y = (box.Top + box.Bottom) / 2;
+        sheet.Line(box.Left, y, box.Right, y, look.Stroke(Look.CurveWidth));
+        sheet.Mark(look.Mark, (box.Left + box.Right) / 2, y, 3, look.Colour);
+    }, details);
+
+    /// <summary>A line without a mark.</summary>
+    public static LegendEntry Line(string name, Stroke stroke) => new(name, (sheet, box) =>
+        sheet.Line(box.Left, (box.Top + box.Bottom) / 2, box.Right, (box.Top + box.Bottom) / 2, stroke));
+
+    /// <summary>A filled patch.</summary>
+    public static LegendEntry Patch(string name, Colour colour) => new(name, (sheet, box) =>
+    {
+        var patch = new Box(box.Right - 14, box.Top + 3, box.Right, box.Bottom - 2);
+        sheet.Fill(patch, colour);
+        sheet.Outline(patch, Look.Frame with { Width = 0.6 });
+    });
+
+    /// <summary>A letter.</summary>
+    public static LegendEntry Key(string name, string key) => new(name, (sheet, box) =>
+        sheet.Write(key, box.Right, box.Bottom - 3.5, Look.Text with { Bold = true, Anchor = Anchor.End }));
+}
+
+/// <summary>A legend below the panels: in columns, or one row an entry when there are details.</summary>
+internal static class Legend
+{
+    private const double RowHeight = 16;
+    private const double SampleWidth = 38;
+    private const double Gap = 7;
+    private const double ColumnGap = 18;
+    private const double WidestName = 250;
+
+    /// <summary>Height the entries need.</summary>
+    public static double Height(IReadOnlyList<LegendEntry> entries, double width) =>
+        entries.Count == 0 ? 0 : Rows(entries, width) * RowHeight + 8;
+
+    /// <summary>Draws the entries below y.</summary>
+    public static void Draw(Sheet sheet, IReadOnlyList<LegendEntry> entries, double left, double top, double width)
+    {
+        int rows = Rows(entries, width);
+        double columnWidth = ColumnWidth(entries, width);
+        bool details = entries.Any(e => e.Details.Length > 0);
+        double names = entries.Count == 0 ? 0 : entries.Max(e => Math.Min(WidestName, Roboto.Width(e.Name, Look.Text)));
+        for (int i = 0; i < entries.Count; i++)
+        {
+            double x = left + i / rows * columnWidth, y = top + i % rows * RowHeight;
+            entries[i].Sample?.Invoke(sheet, new Box(x, y, x + SampleWidth, y + RowHeight));
+            double text = x + SampleWidth + Gap, baseline = y + RowHeight - 4;
+            double room = details && entries[i].Details.Length > 0 ? names : Math.Min(columnWidth, left + width - x) - SampleWidth - Gap - 2;
+            sheet.Write(Roboto.Fit(entries[i].Name, Look.Text, Math.Max(room, 30)), text, baseline, Look.Text);
+            WriteDetails(sheet, entries[i].Details, text + names + 12, left + width, baseline);
+        }
+    }
+
+    private static void WriteDetails(Sheet sheet, string[] details, double x, double right, double baseline)
+    {
+        foreach (string detail in details)
+        {
+            double width = Roboto.Width(detail, Look.Note);
+            if (x + width > right)
+            {
+                break;
+            }
+
+            sheet.Write(detail, x, baseline, Look.Note);
+            x += width + 14;
+        }
+    }
+
+    private static double ColumnWidth(IReadOnlyList<LegendEntry> entries, double width) =>
+        entries.Count == 0 || entries.Any(e => e.Details.Length > 0)
+            ? width
+            : Math.Min(width, SampleWidth + Gap + ColumnGap + entries.Max(e => Math.Min(WidestName, Roboto.Width(e.Name, Look.Text) + 1)));
+
+    private static int Rows(IReadOnlyList<LegendEntry> entries, double width)
+    {
+        int columns = Math.Max(1, (int)((width + ColumnGap) / ColumnWidth(entries, width)));
+        return Math.Max(1, (entries.Count + columns - 1) / columns);
+    }
+}

@@ -1,0 +1,100 @@
+using System.Text;
+using HarmonicSweep.Studies;
+
+namespace HarmonicSweep.Reports.Pictures;
+
+/// <summary>Plans the pictures of a study and writes them.</summary>
+public static class PictureBook
+{
+    private const int LongestName = 60;
+
+    /// <summary>The pictures a result has data for, in the order a report shows them.</summary>
+    /// <param name="caseTitle">Title of the case.</param>
+    /// <param name="result">What was computed.</param>
+    /// <param name="settings">PCC and summation rule of the study.</param>
+    public static IReadOnlyList<Picture> Plan(string caseTitle, StudyResult result, StudySettings settings)
+    {
+        var context = new PictureContext(caseTitle, result, settings);
+        IEnumerable<Picture> pictures =
+        [
+            .. ImpedancePicture.Plan(context),
+            .. SpectrumPicture.Plan(context),
+            .. DistortionPicture.Plan(context),
+            .. PositionMapPicture.Plan(context),
+            .. GainPicture.Plan(context),
+        ];
+        var names = new HashSet<string>(StringComparer.OrdinalIgnoreCase);
+        return [.. pictures.Select(p => p.Named(UniqueName(p.FileName, names)))];
+    }
+
+    /// <summary>Characters in the titles that the embedded font cannot draw: the SVG has them, a PNG shows a box for each.</summary>
+    public static IReadOnlyList<string> MissingCharacters(IEnumerable<Picture> pictures) =>
+        [.. Drawing.Roboto.Missing(string.Concat(pictures.Select(p => p.Title)))];
+
+    /// <summary>Draws the pictures and writes each as PNG and SVG; an earlier picture of the same name is replaced.</summary>
+    /// <param name="pictures">Pictures of one plan.</param>
+    /// <param name="folder">Folder; made when it does not exist.</param>
+    /// <param name="threads">Pictures drawn at the same time; the bytes do not depend on it.</param>
+    /// <param name="cancellation">Stops between pictures; nothing new is left in the folder then.</param>
+    /// <returns>Paths written, PNG and SVG of each picture in the order of the plan.</returns>
+    /// <exception cref="IOException">The folder cannot be written; nothing new is left in it.</exception>
+    /// <exception cref="UnauthorizedAccessException">The folder may not be written; likewise.</exception>
+    public static IReadOnlyList<string> Write(
+        IReadOnlyList<Picture> pictures, string folder, int threads, CancellationToken cancellation = default)
+    {
+        Directory.CreateDirectory(folder);
+        string[] paths = [.. pictures.SelectMany(p => new[] { p.FileName + ".png", p.FileName + ".svg" }).Select(f => Path.Combine(folder, f))];
+        try
+        {
+            var options = new ParallelOptions { MaxDegreeOfParallelism = Math.Max(1, threads), CancellationToken = cancellation };
+            Parallel.For(0, paths.Length, options, i => File.WriteAllBytes(Unfinished(paths[i]), BytesOf(pictures[i / 2], png: i % 2 == 0)));
+            foreach (string path in paths)
+            {
+                File.Move(Unfinished(path), path, overwrite: true);
+            }
+        }
+        catch (AggregateException e) when (e.Flatten().InnerExceptions is [IOException or UnauthorizedAccessException, ..])
+        {
+            System.Runtime.ExceptionServices.ExceptionDispatchInfo.Throw(e.Flatten().InnerExceptions[0]);
+        }
+        finally
+        {
+            foreach (string path in paths.Select(Unfinished))
+            {
+                File.Delete(path); // nothing is there after success
+            }
+        }
+
+        return paths;
+    }
+
+    private static string Unfinished(string path) => path + ".unfinished";
+
+    private static byte[] BytesOf(Picture picture, bool png) => png ? picture.ToPng() : Encoding.UTF8.GetBytes(picture.ToSvg());
+
+    /// <summary>Lower-case ASCII letters, digits and single hyphens, so that the name suits every file system and address.</summary>
+    private static string UniqueName(string wanted, HashSet<string> taken)
+    {
+        var name = new StringBuilder();
+        foreach (char c in wanted)
+        {
+            if (char.IsAsciiLetterOrDigit(c))
+            {
+                name.Append(char.ToLowerInvariant(c));
+            }
+            else if (name.Length > 0 && name[^1] != '-')
+            {
+                name.Append('-');
+            }
+        }
+
+        string stem = name.ToString(0, Math.Min(name.Length, LongestName)).Trim('-');
+        string unique = stem;
+        for (int i = 2; !taken.Add(unique); i++)
+        {
+            unique = FormattableString.Invariant($"{stem}-{i}");
+        }
+
+        return unique;
+    }
+}

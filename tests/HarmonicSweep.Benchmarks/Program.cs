@@ -1,0 +1,3 @@
+using BenchmarkDotNet.Running;
+
+BenchmarkSwitcher.FromAssembly(typeof(HarmonicSweep.Benchmarks.NodalSolve).Assembly).Run(args);
