@@ -59,15 +59,16 @@ internal sealed class DistortionComparison
         Assert.Equal(expectedOrders.Length * _plant.Buses.Count, _result.Voltages.Count);
         foreach (HarmonicVoltage voltage in _result.Voltages)
         {
-            double scale = Math.Sqrt(3) / 1000;
-            Complex[] parts = [.. _twin.Volt(voltage.Bus, voltage.Order).Select(v => v * scale)];
-            double noise = _roundings * scale * _twin.RoundingVolt(voltage.Bus, voltage.Order) + 1e-12 * _plant.Bus(voltage.Bus).NominalKv;
+            double toKv = Math.Sqrt(3) / 1000;
+            Complex[] parts = [.. _twin.Volt(voltage.Bus, voltage.Order).Select(v => v * toKv)];
+            double noise = _roundings * toKv * _twin.RoundingVolt(voltage.Bus, voltage.Order) + 1e-12 * _plant.Bus(voltage.Bus).NominalKv;
             string where = Key(voltage.Bus, voltage.Order);
-            Close(where, Sum(parts), voltage.Kv, TwinRules.Arithmetic(voltage.Order, parts), noise);
+            double scale = Math.Max(voltage.Order, 1) * TwinRules.Arithmetic(voltage.Order, parts);
+            Close(where, Sum(parts), voltage.Kv, scale, noise);
             double percent = 100 / _plant.Bus(voltage.Bus).NominalKv;
             foreach (SummationRule rule in Enum.GetValues<SummationRule>())
             {
-                Close($"{where} {rule}", Rules(voltage.Order, parts)[rule], voltage.KvByRule[rule], TwinRules.Arithmetic(voltage.Order, parts), noise);
+                Close($"{where} {rule}", Rules(voltage.Order, parts)[rule], voltage.KvByRule[rule], scale, noise);
                 Close($"{where} {rule} %", percent * voltage.KvByRule[rule], voltage.PercentOfNominal[rule], percent * voltage.KvByRule[rule], 0);
             }
         }
@@ -83,7 +84,7 @@ internal sealed class DistortionComparison
             if (expected is { } thd)
             {
                 // contributions of several sources may cancel: the arithmetic sum is the scale of the rounding
-                double scale = _twin.ThdPercent(distortion.Bus, TwinRules.Arithmetic)!.Value;
+                double scale = _twin.ThdPercent(distortion.Bus, (h, parts) => h * TwinRules.Arithmetic(h, parts))!.Value;
                 double noise = _twin.Orders.Sum(h => _roundings * _twin.RoundingVolt(distortion.Bus, h)) / _twin.Flow.Volt(distortion.Bus).Magnitude;
                 Close($"THD {distortion.Bus} {distortion.Rule}", thd, distortion.PercentOfFundamental!.Value, scale, 100 * noise);
                 double nominal = thd * _twin.Flow.Volt(distortion.Bus).Magnitude * Math.Sqrt(3) / 1000 / _plant.Bus(distortion.Bus).NominalKv;
@@ -109,7 +110,7 @@ internal sealed class DistortionComparison
                 }
 
                 // a branch current is a difference of terms Y V that may cancel: measure rounding against the terms
-                double scale = TwinRules.Arithmetic(order, parts);
+                double scale = Math.Max(order, 1) * TwinRules.Arithmetic(order, parts);
                 double noise = _twin.RoundingAmpere(element, bus, order) * _roundings;
                 Close(where, Sum(parts), current.Ampere, scale, noise);
                 foreach (SummationRule rule in Enum.GetValues<SummationRule>())
