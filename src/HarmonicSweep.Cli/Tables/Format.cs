@@ -32,7 +32,7 @@ internal static class Format
     }
 
     /// <summary>Four significant digits, but never more than four decimals: less of a percent matters to nobody.</summary>
-    public static string Percent(double? value) => value is { } number && Math.Abs(number) < 1
+    public static string Percent(double? value) => value is { } number and not 0 && Math.Abs(number) < 1
         ? number.ToString("F4", CultureInfo.InvariantCulture)
         : Number(value);
 

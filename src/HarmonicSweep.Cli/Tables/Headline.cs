@@ -30,11 +30,12 @@ internal static class Headline
             return;
         }
 
+        string[] buses = [.. limits.Select(l => l.Row.Bus).OfType<string>().Distinct(StringComparer.Ordinal)];
         int Count(Verdict verdict) => limits.Count(l => l.Row.Verdict == verdict);
         Line(
             writer, "Limits",
-            $"{Format.Count(Count(Verdict.Exceeded))} exceeded, {Format.Count(Count(Verdict.Within))} within, {Format.Count(Count(Verdict.NotJudged))} not judged; "
-            + $"they hold at {Format.Some([.. limits.Select(l => l.Row.Bus).OfType<string>().Distinct(StringComparer.Ordinal)], 3)} only");
+            $"{Format.Count(Count(Verdict.Exceeded))} exceeded, {Format.Count(Count(Verdict.Within))} within, {Format.Count(Count(Verdict.NotJudged))} not judged"
+            + (buses.Length > 0 ? $"; they hold at {Format.Some(buses, 3)} only" : ""));
         InState<LimitVerdict> first = limits[0];
         if (ReportView.UsePercent(first.Row) is { } use)
         {
