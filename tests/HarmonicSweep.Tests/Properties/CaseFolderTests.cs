@@ -28,16 +28,16 @@ public sealed class CaseFolderTests
             string label = $"{folder}, state {state.Name}";
             DistortionComparison.Check(plant, state, ProductSide.Distortion(plant, state), label, 1e-10, 64);
             DenseTwin twin = new(plant, state);
+            TwinMatrix[] matrices = [.. _orders.Select(h => twin.Matrix(h, 1))];
             foreach (Bus from in plant.Buses)
             {
                 Dictionary<string, IReadOnlyList<Complex?>> column = ProductSide.Column(plant, state, from.Name, Sequence.Positive, _orders);
-                for (int n = 0; n < _orders.Length; n++)
+                foreach (Bus at in plant.Buses)
                 {
-                    TwinMatrix matrix = twin.Matrix(_orders[n], 1);
-                    foreach (Bus at in plant.Buses)
+                    for (int n = 0; n < _orders.Length; n++)
                     {
                         ImpedanceComparison.Check(
-                            matrix, at.Name, from.Name, column[at.Name][n], string.Create(CultureInfo.InvariantCulture, $"{label}, h = {_orders[n]}"));
+                            matrices[n], at.Name, from.Name, column[at.Name][n], string.Create(CultureInfo.InvariantCulture, $"{label}, h = {_orders[n]}"));
                     }
                 }
             }
