@@ -11,8 +11,8 @@ internal sealed partial record Workshop
     /// <summary>The readers, studies and plots of the program.</summary>
     public static Workshop Real { get; } = new()
     {
-        ReadCase = static folder => throw new NotSupportedException(),
-        NewCase = static folder => throw new NotSupportedException(),
+        ReadCase = static folder => Read(folder),
+        NewCase = static folder => CaseTemplate.Write(folder),
         DrawPlots = Draw,
         Check = static (request, progress, cancellation) => CheckStudy.Run(request, progress, cancellation),
         Impedance = static (request, progress, cancellation) => ImpedanceStudy.Run(request, progress, cancellation),
@@ -20,6 +20,12 @@ internal sealed partial record Workshop
         Screen = static (request, progress, cancellation) => ScreenStudy.Run(request, progress, cancellation),
         Main = static (request, progress, cancellation) => MainStudy.Run(request, progress, cancellation),
     };
+
+    private static (CaseFile? Case, IReadOnlyList<Finding> Findings) Read(string folder)
+    {
+        CaseReadResult read = CaseReader.Read(folder);
+        return (read.Case, read.Findings);
+    }
 
     private static IReadOnlyList<Finding> Draw(
         CaseFile caseFile, StudyResult result, string folder, int threads, CancellationToken cancellation)
