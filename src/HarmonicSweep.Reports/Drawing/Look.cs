@@ -63,9 +63,11 @@ internal static class Look
     public static readonly Stroke MajorGrid = new(Colour.Of(0xD3D8DD), 0.8);
     public static readonly Stroke MinorGrid = new(Colour.Of(0xECEFF1), 0.8);
     public static readonly Stroke InjectedOrder = new(Colour.Of(0x8A6D3B), 0.8, 1.5f, 2);
+    public static readonly Stroke InjectedOrderOnShade = new(Ink, 1, 1.5f, 2);
     public static readonly Stroke LimitLine = new(Limit, 1.6, 6, 3);
 
     public static readonly TextStyle Title = new(TitleSize, Ink, Bold: true);
+    public static readonly TextStyle LongTitle = Title with { Size = 12 };
     public static readonly TextStyle Subtitle = new(TextSize, Faded);
     public static readonly TextStyle AxisTitle = new(AxisSize, Ink, Anchor: Anchor.Middle);
     public static readonly TextStyle AxisTitleTurned = AxisTitle with { Turned = true };

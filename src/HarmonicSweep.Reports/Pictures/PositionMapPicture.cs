@@ -13,6 +13,8 @@ internal static class PositionMapPicture
     private const double PanelGap = 30;
     private const double FlagRoom = 118;
 
+    private static readonly TextStyle NameStyle = Look.Text with { Anchor = Anchor.End, Bold = true };
+
     /// <summary>A picture a bank and base state; further ones when there are more supply strengths than fit one.</summary>
     public static IEnumerable<Picture> Plan(PictureContext context)
     {
@@ -34,7 +36,10 @@ internal static class PositionMapPicture
     {
         PositionMap first = maps[0];
         double[] injected = [.. maps.SelectMany(m => m.InjectedOrders).Distinct().Order()];
-        double above = OrderMarks.Room(injected) + 16, rowHeight = Math.Clamp(260.0 / maps.Max(m => m.StepsIn.Count), 14, 24);
+        LinearScale across = LinearScale.Over(maps.Min(m => m.Orders[0]), maps.Max(m => m.Orders[^1]), 12);
+        double left = Math.Ceiling(Picture.Margin + 26 + maps.SelectMany(m => NamesOf(screen, m)).Max(n => Roboto.Width(n, NameStyle)));
+        double right = Picture.Width - Picture.Margin - FlagRoom;
+        double above = OrderMarks.Room(across, right - left, injected) + 16, rowHeight = Math.Clamp(260.0 / maps.Max(m => m.StepsIn.Count), 14, 24);
         double[] tops = new double[maps.Length];
         double y = Picture.HeaderHeight;
         for (int i = 0; i < maps.Length; i++)
@@ -44,20 +49,19 @@ internal static class PositionMapPicture
         }
 
         double keyTop = y + 8;
-        string subtitle = $"{context.CaseTitle} · from state {first.BaseState} · bank positions down, order across";
-        return new Picture($"positions-{first.Bank}-{first.BaseState}", $"|Z| at {context.BusText(first.Bus)} over the positions of {first.Bank}", subtitle, keyTop + HeatKey.Height, sheet =>
+        string choices = $"from state {first.BaseState} · bank positions down, order across";
+        return new Picture($"positions-{first.Bank}-{first.BaseState}", $"|Z| at {context.BusText(first.Bus)} over the positions of {first.Bank}", context.CaseTitle, choices, keyTop + HeatKey.Height, sheet =>
         {
             LogScale shade = HeatKey.ScaleOf(maps);
-            LinearScale across = LinearScale.Over(maps.Min(m => m.Orders[0]), maps.Max(m => m.Orders[^1]), 12);
             for (int i = 0; i < maps.Length; i++)
             {
                 BankPosition?[] rows = PositionsOf(screen, maps[i]);
-                string[] names = [.. maps[i].StepsIn.Select((s, r) => NameOf(s, rows[r]))];
-                double left = Math.Ceiling(Picture.Margin + 26 + names.Max(n => Roboto.Width(n, Look.Text)));
-                var area = new Box(left, tops[i], Picture.Width - Picture.Margin - FlagRoom, tops[i] + names.Length * rowHeight);
+                string[] names = NamesOf(screen, maps[i]);
+                var area = new Box(left, tops[i], right, tops[i] + names.Length * rowHeight);
                 var panel = new Panel(area, across, new CategoryScale(names));
-                DrawPanel(sheet, panel, maps[i], shade, rows, rowHeight);
-                OrderMarks.DrawLines(sheet, panel, injected, halo: true);
+                HeatRows.Draw(sheet, panel, maps[i], shade, rowHeight);
+                OrderMarks.DrawLines(sheet, panel, injected, shaded: true);
+                DrawRows(sheet, panel, rows, rowHeight);
                 OrderMarks.DrawNumbers(sheet, panel, injected);
                 sheet.Outline(area, Look.Frame);
                 sheet.Write($"Supply strength: {StrengthText(maps[i].Strength)}", area.Left, tops[i] - above + 12, Look.Text with { Bold = true });
@@ -72,16 +76,15 @@ internal static class PositionMapPicture
         });
     }
 
-    private static void DrawPanel(Sheet sheet, Panel panel, PositionMap map, LogScale shade, BankPosition?[] rows, double rowHeight)
+    private static void DrawRows(Sheet sheet, Panel panel, BankPosition?[] rows, double rowHeight)
     {
-        HeatRows.Draw(sheet, panel, map, shade, rowHeight);
         for (int row = 0; row < rows.Length; row++)
         {
             double top = panel.Area.Top + row * rowHeight, middle = top + rowHeight / 2;
             bool flagged = rows[row]?.DoNotDwell == true;
             sheet.Line(panel.Area.Left, top, panel.Area.Right, top, new Stroke(Look.Paper, 1));
             sheet.Write(
-                panel.Up.Ticks[row].Label!, panel.Area.Left - 7, middle + 4, Look.Text with { Anchor = Anchor.End, Bold = flagged });
+                panel.Up.Ticks[row].Label!, panel.Area.Left - 7, middle + 4, NameStyle with { Bold = flagged });
             foreach (Resonance peak in rows[row]?.ParallelResonances ?? [])
             {
                 if (peak.Order >= panel.Across.From && peak.Order <= panel.Across.To)
@@ -115,6 +118,12 @@ internal static class PositionMapPicture
         ];
         bool matches = positions.Select(p => p.StepsIn).SequenceEqual(map.StepsIn);
         return [.. map.StepsIn.Select((steps, row) => matches ? positions[row] : Array.Find(positions, p => p.StepsIn == steps))];
+    }
+
+    private static string[] NamesOf(ScreenResult screen, PositionMap map)
+    {
+        BankPosition?[] rows = PositionsOf(screen, map);
+        return [.. map.StepsIn.Select((steps, row) => NameOf(steps, rows[row]))];
     }
 
     private static string NameOf(int stepsIn, BankPosition? position) => position is null
