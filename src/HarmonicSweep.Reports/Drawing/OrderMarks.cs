@@ -5,7 +5,7 @@ internal static class OrderMarks
 {
     private const double RowHeight = 11;
     private const double Gap = 3;
-    private const double TickLength = 3;
+    private const double TickLength = 4;
 
     /// <summary>More orders than these are ticks above the frame alone, since as lines they would hide the curves.</summary>
     private const int MostLines = 40;
@@ -16,7 +16,7 @@ internal static class OrderMarks
     public static double Room(Scale across, double width, IReadOnlyList<double> orders)
     {
         List<Number> numbers = Numbers(across, 0, width, orders);
-        return numbers.Count == 0 ? 4 : 5 + RowHeight * (1 + numbers.Max(n => n.Row));
+        return numbers.Count == 0 ? 4 : TickLength + 3 + RowHeight * (1 + numbers.Max(n => n.Row));
     }
 
     /// <summary>The lines; on a shaded panel with a white rim.</summary>
@@ -48,12 +48,12 @@ internal static class OrderMarks
         {
             double lift = number.Row * RowHeight;
             sheet.Line(number.X, panel.Area.Top - TickLength - lift, number.X, panel.Area.Top - TickLength, tick);
-            sheet.Write(number.Label, number.X, panel.Area.Top - 5 - lift, Look.InjectedLabel);
+            sheet.Write(number.Label, number.X, panel.Area.Top - TickLength - 3 - lift, Look.InjectedLabel);
         }
 
         if (numbers.Count > 0)
         {
-            sheet.Write("injected", panel.Area.Left - 8, panel.Area.Top - 5, Look.InjectedLabel with { Anchor = Anchor.End });
+            sheet.Write("injected", panel.Area.Left - 8, panel.Area.Top - TickLength - 3, Look.InjectedLabel with { Anchor = Anchor.End });
         }
     }
 
