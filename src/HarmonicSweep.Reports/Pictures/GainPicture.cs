@@ -82,7 +82,7 @@ internal static class GainPicture
         {
             labels.TryWrite(
                 sheet, new Spot(panel.X(order), panel.Y(peak)), Look.Small with { Colour = look.Colour, Bold = true },
-                Figures.ComputedOrder(order), Figures.Short(peak));
+                $"h {Figures.ComputedOrder(order)}", $"{Figures.Short(peak)} pu");
         }
     }
 

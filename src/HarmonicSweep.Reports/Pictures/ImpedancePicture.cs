@@ -121,7 +121,7 @@ internal static class ImpedancePicture
         {
             labels.TryWrite(
                 sheet, new Spot(panel.X(peak.Order), panel.Y(peak.Ohm)), Look.Small with { Colour = look.Colour, Bold = true },
-                Figures.ComputedOrder(peak.Order), Figures.Short(peak.Ohm) + " Ω");
+                $"h {Figures.ComputedOrder(peak.Order)}", $"{Figures.Short(peak.Ohm)} Ω");
         }
     }
 

@@ -73,7 +73,7 @@ public sealed class PlotTextTests
         Assert.Contains("Angle (°)", texts);
         Assert.Contains("Order h (frequency / fundamental)", texts);
         Assert.Contains("Netz schwach", texts);
-        Assert.Contains("7.00", texts);
+        Assert.Contains("h 7.00", texts);
         Assert.Contains("15.7 Ω", texts);
         Assert.Contains("7.00: 15.7 Ω", texts);
         Assert.All(new[] { "5", "7", "11", "13" }, order => Assert.Contains(order, texts));
