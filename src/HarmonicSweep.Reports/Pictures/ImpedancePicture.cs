@@ -149,6 +149,11 @@ internal static class ImpedancePicture
         }
 
         entries.AddRange(without.Take(MostCurves).Select(s => new LegendEntry(s, null, "bus dead or not scanned in this state")));
+        if (without.Count > MostCurves)
+        {
+            entries.Add(new LegendEntry(FormattableString.Invariant($"and {without.Count - MostCurves} more states"), null, "likewise"));
+        }
+
         return entries;
     }
 

@@ -33,7 +33,7 @@ public sealed class Picture
     }
 
     /// <summary>File name without folder and extension; differs from that of every other picture of its plan.</summary>
-    public string FileName { get; internal init; }
+    public string FileName { get; }
 
     /// <summary>What it shows, at which bus.</summary>
     public string Title { get; }

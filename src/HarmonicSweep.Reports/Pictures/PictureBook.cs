@@ -52,7 +52,7 @@ public static class PictureBook
     /// <param name="threads">Pictures drawn at the same time; the bytes do not depend on it.</param>
     /// <param name="cancellation">Stops between pictures; nothing new is left in the folder then.</param>
     /// <returns>Paths written, PNG and SVG of each picture in the order of the plan.</returns>
-    /// <exception cref="IOException">The folder cannot be written; nothing new is left in it.</exception>
+    /// <exception cref="IOException">The folder or a file in it cannot be written; no half-written picture is left.</exception>
     /// <exception cref="UnauthorizedAccessException">The folder may not be written; likewise.</exception>
     public static IReadOnlyList<string> Write(
         IReadOnlyList<Picture> pictures, string folder, int threads, CancellationToken cancellation = default)
@@ -74,9 +74,9 @@ public static class PictureBook
         }
         finally
         {
-            foreach (string path in paths.Select(Unfinished))
+            foreach (string path in paths.Select(Unfinished).Where(File.Exists))
             {
-                File.Delete(path); // nothing is there after success
+                File.Delete(path);
             }
         }
 

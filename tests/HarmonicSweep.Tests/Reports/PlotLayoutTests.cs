@@ -69,7 +69,7 @@ public sealed class PlotLayoutTests
         SampleStudies sample = shape switch
         {
             "plain" => new SampleStudies { Buses = 3, States = 3 },
-            "many" => new SampleStudies { Buses = 40, States = 14, OrderStep = 0.25, BankSteps = 12, DeadInLastState = true },
+            "many" => new SampleStudies { Buses = 28, States = 11, OrderStep = 0.25, BankSteps = 12, DeadInLastState = true },
             "long names" => new SampleStudies
             {
                 Buses = 12, States = 3, OrderStep = 0.25, BusName = Long, DeadInLastState = true,

@@ -89,8 +89,7 @@ public sealed class PlotTextTests
         Spot[] curve = sheet.Lines.Where(l => l.Stroke.Colour == Look.Series[0].Colour).Select(l => l.Spots).OrderBy(s => s.Min(p => p.Y)).First();
         Spot top = curve.MinBy(p => p.Y);
         // two injected orders with known places give the scale across
-        double five = sheet.Texts.First(t => t.Text == "5" && t.Style == Look.InjectedLabel).Box.Left, thirteen = MiddleOf(sheet, "13");
-        five = MiddleOf(sheet, "5");
+        double five = MiddleOf(sheet, "5"), thirteen = MiddleOf(sheet, "13");
         double order = 5 + (top.X - five) / (thirteen - five) * 8;
         Assert.Equal(7, order, 0.01); // the scan has points at 6.9 and 7.15 only; a unit of the sheet is 0.04 orders here
     }
@@ -161,6 +160,18 @@ public sealed class PlotTextTests
         Assert.Contains("Supply strength: minimum", texts);
         Assert.Contains("3 of 6 · 150 kvar", texts);
         Assert.Contains("|Z| (Ω)", texts);
+    }
+
+    [Fact]
+    public void Positions_beyond_a_page_go_on_in_further_pictures()
+    {
+        var sample = new SampleStudies { Buses = 1, BankSteps = 49, OrderStep = 0.5 };
+        Picture[] pages = [.. PictureBook.Plan("Case", sample.Build(), sample.Settings).Where(p => p.FileName.StartsWith("positions", StringComparison.Ordinal))];
+
+        string[] rows = [.. pages.SelectMany(TextsOf).Where(t => t.Contains(" of 49 · ", StringComparison.Ordinal))];
+        Assert.Equal(100, rows.Length); // 0 to 49 steps at two strengths
+        Assert.Equal(50, rows.Distinct(StringComparer.Ordinal).Count());
+        Assert.All(pages, p => Assert.InRange(p.Height, 100, 960)); // 24 cm, the height of a printed page
     }
 
     private static double MiddleOf(RecordingSheet sheet, string injected)
