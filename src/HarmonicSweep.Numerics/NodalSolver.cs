@@ -189,14 +189,17 @@ public sealed class NodalSolver : INodalSolver
 
             _residual[row] = sum;
             finite &= Complex.IsFinite(sum);
-            worst = Math.Max(worst, Complex.Abs(sum));
-            largestSolution = Math.Max(largestSolution, Complex.Abs(solution[row]));
-            largestRight = Math.Max(largestRight, Complex.Abs(rightHandSide[row]));
+            worst = Math.Max(worst, SquareOf(sum));
+            largestSolution = Math.Max(largestSolution, SquareOf(solution[row]));
+            largestRight = Math.Max(largestRight, SquareOf(rightHandSide[row]));
         }
 
-        double scale = _norm * largestSolution + largestRight;
-        return !finite ? double.NaN : scale > 0 ? worst / scale : 0;
+        double scale = _norm * Math.Sqrt(largestSolution) + Math.Sqrt(largestRight);
+        return !finite ? double.NaN : scale > 0 ? Math.Sqrt(worst) / scale : 0;
     }
+
+    /// <summary>|z|^2: comparing squares spares a root an entry.</summary>
+    private static double SquareOf(Complex z) => z.Real * z.Real + z.Imaginary * z.Imaginary;
 
     private double InfinityNorm()
     {

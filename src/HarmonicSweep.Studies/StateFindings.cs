@@ -22,6 +22,17 @@ internal static class StateFindings
 
         foreach (StateResult state in states)
         {
+            if (state.PowerFlowFailure is { } failure)
+            {
+                Say(
+                    failure with
+                    {
+                        Severity = Severity.Warning,
+                        Message = failure.Message.TrimEnd('.') + "; impedances do not depend on it and are given, distortion cannot be",
+                    },
+                    state.State);
+            }
+
             foreach (string bus in state.DeadBuses)
             {
                 Say(

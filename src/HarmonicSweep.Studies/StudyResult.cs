@@ -29,6 +29,9 @@ public sealed record StateResult
     /// <summary>Fundamental voltage of every live bus.</summary>
     public IReadOnlyList<BusVoltage> PowerFlow { get; init; } = [];
 
+    /// <summary>Why there is no power flow; null when it was solved.</summary>
+    public Finding? PowerFlowFailure { get; init; }
+
     /// <summary>Buses not tied to a source in service.</summary>
     public IReadOnlyList<string> DeadBuses { get; init; } = [];
 

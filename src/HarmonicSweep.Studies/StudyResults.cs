@@ -16,7 +16,7 @@ internal static class StudyResults
 
     private static void RequireLiveBus(StateResult[] states)
     {
-        if (states.Length > 0 && states.All(s => s.PowerFlow.Count == 0))
+        if (states.Length > 0 && states.All(s => s.PowerFlow.Count == 0 && s.PowerFlowFailure is null))
         {
             throw new CaseException([new Finding(
                 Severity.Error, "HS203", null,

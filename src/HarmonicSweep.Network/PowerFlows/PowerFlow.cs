@@ -17,6 +17,12 @@ public sealed class PowerFlow
     /// <summary>Mismatch aimed at: harmonics inherit the error, and the last step of Newton's method is cheap.</summary>
     private const double WantedMismatch = 1e-14;
 
+    /// <summary>
+    /// Rounding of a node's power, share of the sum |V_i||Y_ik||V_k| it is made of: what no iteration removes, and the only
+    /// scale where nothing draws power.
+    /// </summary>
+    private const double Rounding = 2e-15;
+
     private const int MostIterations = 60;
     private const int MostHalvings = 12;
 
@@ -26,6 +32,7 @@ public sealed class PowerFlow
     private readonly Complex[] _norton;
     private readonly Complex[] _current;
     private readonly double _largestPower;
+    private double _largestTerms;
     private Complex[] _voltage;
 
     private PowerFlow(Circuit circuit)
@@ -47,7 +54,7 @@ public sealed class PowerFlow
 
         _current = new Complex[size];
         _voltage = new Complex[size];
-        _largestPower = Math.Max(_nodes.LargestMva, 1e-6);
+        _largestPower = _nodes.LargestMva;
     }
 
     /// <summary>Solves the power flow of a plant in a state.</summary>
@@ -77,19 +84,21 @@ public sealed class PowerFlow
         {
             iteration++;
             double before = error;
-            if (!TryStep(ref mismatch, ref error) || (before <= AcceptedMismatch * _largestPower && error > before / 4))
+            if (!TryStep(ref mismatch, ref error) || (before <= Accepted && error > before / 4))
             {
                 break;
             }
         }
 
-        if (!(error <= AcceptedMismatch * _largestPower))
+        if (!(error <= Accepted))
         {
             throw Diverged(mismatch);
         }
 
         return new PowerFlowSolution(_circuit, _voltage, _nodes.Live, GeneratorPowers(), error, iteration);
     }
+
+    private double Accepted => Math.Max(AcceptedMismatch * _largestPower, Rounding * _largestTerms);
 
     /// <summary>One Newton step, halved while it makes the mismatch larger; false when no step improves.</summary>
     private bool TryStep(ref Complex[] mismatch, ref double error)
@@ -134,15 +143,20 @@ public sealed class PowerFlow
     {
         SparsityPattern pattern = _circuit.Pattern;
         var mismatch = new Complex[pattern.Size];
+        _largestTerms = 0;
         for (int row = 0; row < pattern.Size; row++)
         {
             Complex sum = -_norton[row];
+            double terms = Complex.Abs(_norton[row]);
             for (int p = pattern.RowStart[row]; p < pattern.RowStart[row + 1]; p++)
             {
-                sum += _admittance[p] * voltage[pattern.Columns[p]];
+                Complex term = _admittance[p] * voltage[pattern.Columns[p]];
+                sum += term;
+                terms += Complex.Abs(term);
             }
 
             _current[row] = sum;
+            _largestTerms = Math.Max(_largestTerms, terms * Complex.Abs(voltage[row]));
             Complex difference = _nodes.SpecifiedMva[row] - voltage[row] * Complex.Conjugate(sum);
             mismatch[row] = _nodes.Kind[row] switch
             {

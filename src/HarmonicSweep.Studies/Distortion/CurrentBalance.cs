@@ -4,7 +4,10 @@ using static System.FormattableString;
 
 namespace HarmonicSweep.Studies;
 
-/// <summary>Kirchhoff's current law on the reported currents: their sum at every node against the sum of their magnitudes.</summary>
+/// <summary>
+/// Kirchhoff's current law on the reported currents: their sum at every node against the sum of the terms they are made of,
+/// y V each. A current of a branch is a difference of such terms and carries their rounding, however small it is itself.
+/// </summary>
 internal static class CurrentBalance
 {
     /// <summary>Beyond this share the run fails.</summary>
@@ -15,22 +18,23 @@ internal static class CurrentBalance
     public static double Residual(PlantInState plant, NodeMap nodes, SolvedOrder solved)
     {
         var sum = new Complex[nodes.Count];
-        double[] magnitude = new double[nodes.Count];
+        double[] terms = new double[nodes.Count];
         foreach (EndCurrent end in solved.Ends)
         {
             Complex ampere = Summation.Phasor(end.Ampere);
             int node = nodes[end.Bus];
             double kv = plant.Plant.Bus(end.Bus).NominalKv;
             sum[node] += ampere * kv;
-            magnitude[node] += Complex.Abs(ampere) * kv;
+            terms[node] += end.Terms * kv;
         }
 
-        // a node that hardly carries anything is measured against the busiest one
-        double floor = magnitude.DefaultIfEmpty(0).Max() * 1e-6;
+        // a node that hardly carries anything is measured against the busiest one, so that the bound there is 1e-10 of the
+        // largest power: what the power flow is held to
+        double floor = terms.DefaultIfEmpty(0).Max() * 0.01;
         double worst = 0;
         for (int node = 0; node < nodes.Count; node++)
         {
-            double scale = Math.Max(magnitude[node], floor);
+            double scale = Math.Max(terms[node], floor);
             double residual = scale > 0 ? Complex.Abs(sum[node]) / scale : 0;
             if (!(residual <= Bound))
             {

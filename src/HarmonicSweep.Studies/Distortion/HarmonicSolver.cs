@@ -126,16 +126,16 @@ internal sealed class HarmonicSolver
 
         foreach (CircuitShunt shunt in circuit.Shunts)
         {
-            Complex[] kv = NodeKv(circuit, shunt.Node, perUnit);
-            for (int s = 0; s < kv.Length && !silent; s++)
+            var emf = new Complex[_sources.Length];
+            for (int s = 0; s < emf.Length && !silent; s++)
             {
                 if (_sources[s] is BackgroundSource background && ReferenceEquals(background.Supply, shunt.Element))
                 {
-                    kv[s] -= background.EmfKv(order);
+                    emf[s] = background.EmfKv(order);
                 }
             }
 
-            ends.Add(BranchCurrents.Shunt(shunt, order, kv));
+            ends.Add(BranchCurrents.Shunt(shunt, order, NodeKv(circuit, shunt.Node, perUnit), emf));
         }
 
         ends.AddRange(SourceCurrents(circuit, order, silent));
@@ -163,7 +163,7 @@ internal sealed class HarmonicSolver
                 }
             }
 
-            yield return new EndCurrent(element, element.Name, shunt.Bus, ampere);
+            yield return BranchCurrents.Given(shunt, ampere);
         }
     }
 }

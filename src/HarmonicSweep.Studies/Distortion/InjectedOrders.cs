@@ -5,11 +5,14 @@ namespace HarmonicSweep.Studies;
 /// <summary>Which orders converters inject in a state.</summary>
 internal static class InjectedOrders
 {
-    /// <summary>Orders other than 1 that live, loaded converters inject outside the zero sequence, ascending.</summary>
-    public static IReadOnlyList<double> Of(PlantInState plant, PowerFlowSolution powerFlow) =>
+    /// <summary>
+    /// Orders other than 1 that live, loaded converters inject outside the zero sequence, ascending; without a power flow every
+    /// loaded converter counts as live.
+    /// </summary>
+    public static IReadOnlyList<double> Of(PlantInState plant, PowerFlowSolution? powerFlow) =>
     [
         .. plant.Plant.Of<Converter>()
-            .Where(c => plant.IsIn(c) && plant.LoadingPercent(c) > 0 && powerFlow.IsLive(c.Bus))
+            .Where(c => plant.IsIn(c) && plant.LoadingPercent(c) > 0 && (powerFlow?.IsLive(c.Bus) ?? true))
             .SelectMany(c => c.Spectrum.Lines)
             .Where(l => l.Percent != 0)
             .Select(l => HarmonicOrder.Snap(l.Order))

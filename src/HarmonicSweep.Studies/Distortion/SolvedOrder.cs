@@ -14,4 +14,5 @@ internal sealed record SolvedOrder(double Order, IReadOnlyDictionary<string, Com
 /// <param name="Name">Name under which it is reported.</param>
 /// <param name="Bus">Bus of that end.</param>
 /// <param name="Ampere">Per source, A rms.</param>
-internal sealed record EndCurrent(PlantElement Element, string Name, string Bus, Complex[] Ampere);
+/// <param name="Terms">Sum of the magnitudes of the terms the current is made of, A: the scale of its rounding.</param>
+internal sealed record EndCurrent(PlantElement Element, string Name, string Bus, Complex[] Ampere, double Terms);

@@ -7,7 +7,8 @@ namespace HarmonicSweep.Studies;
 public static class ImpedanceStudy
 {
     /// <summary>Runs the scan in every state asked for.</summary>
-    /// <exception cref="ComputationException">A power flow diverges or a matrix is singular.</exception>
+    /// <remarks>Z(h) does not depend on the power flow: a state whose power flow diverges is scanned all the same, with a warning.</remarks>
+    /// <exception cref="ComputationException">A matrix is singular.</exception>
     /// <exception cref="CaseException">A state cannot be built.</exception>
     /// <exception cref="OperationCanceledException">Cancelled.</exception>
     public static StudyResult Run(StudyRequest request, IProgress<double>? progress, CancellationToken cancellation)
@@ -16,8 +17,25 @@ public static class ImpedanceStudy
         return StudyResults.Of(request, progress, cancellation, state =>
         {
             var plant = new PlantInState(request.Plant, state);
-            return AddTo(StateResults.Start(plant, PowerFlow.Solve(plant)), request, plant, inner, cancellation);
+            return AddTo(Start(plant), request, plant, inner, cancellation);
         });
+    }
+
+    private static StateResult Start(PlantInState plant)
+    {
+        try
+        {
+            return StateResults.Start(plant, PowerFlow.Solve(plant));
+        }
+        catch (ComputationException exception)
+        {
+            return new StateResult
+            {
+                State = plant.State.Name,
+                InjectedOrders = InjectedOrders.Of(plant, null),
+                PowerFlowFailure = exception.Finding,
+            };
+        }
     }
 
     /// <summary>Adds curves, resonances, hand formulas of banks and background gains to what is known of a state.</summary>

@@ -1,0 +1,39 @@
+using HarmonicSweep.Network;
+
+namespace HarmonicSweep.Cases.Reading;
+
+/// <summary>Collects everything that is wrong or doubtful, so that the user mends it in one go.</summary>
+internal sealed class FindingList
+{
+    private readonly List<Finding> _findings = [];
+
+    /// <summary>Whether anything stops the case.</summary>
+    public bool HasErrors { get; private set; }
+
+    /// <summary>How many errors so far: lets a reader see whether its own row is sound.</summary>
+    public int ErrorCount { get; private set; }
+
+    /// <summary>All findings, by file, line and then in the order they were found.</summary>
+    public IReadOnlyList<Finding> Sorted() =>
+    [
+        .. _findings
+            .OrderBy(f => f.Location?.File ?? "", StringComparer.Ordinal)
+            .ThenBy(f => f.Location?.Line ?? 0),
+    ];
+
+    /// <summary>Adds an error.</summary>
+    public void Error(string id, SourceLocation? location, string message, string remedy)
+    {
+        HasErrors = true;
+        ErrorCount++;
+        _findings.Add(new Finding(Severity.Error, id, location, message, remedy));
+    }
+
+    /// <summary>Adds a warning.</summary>
+    public void Warning(string id, SourceLocation? location, string message, string remedy) =>
+        _findings.Add(new Finding(Severity.Warning, id, location, message, remedy));
+
+    /// <summary>Adds a note.</summary>
+    public void Note(string id, SourceLocation? location, string message, string remedy) =>
+        _findings.Add(new Finding(Severity.Note, id, location, message, remedy));
+}

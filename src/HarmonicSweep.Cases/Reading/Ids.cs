@@ -1,0 +1,62 @@
+namespace HarmonicSweep.Cases.Reading;
+
+/// <summary>Identifiers of what reading a case can find. Stable: scripts may rely on them. HS101 and up are plausibility warnings.</summary>
+internal static class Ids
+{
+    public const string NoFolder = "HS001";
+    public const string NoCaseFile = "HS002";
+    public const string Encoding = "HS003";
+    public const string UnknownFile = "HS004";
+    public const string UnknownColumn = "HS005";
+    public const string RepeatedColumn = "HS006";
+    public const string MissingColumn = "HS007";
+    public const string CellCount = "HS008";
+    public const string BlankCell = "HS009";
+    public const string NotANumber = "HS010";
+    public const string OutOfRange = "HS011";
+    public const string UnknownWord = "HS014";
+    public const string UnknownBus = "HS015";
+    public const string RepeatedName = "HS016";
+    public const string LaterModel = "HS017";
+    public const string Malformed = "HS018";
+    public const string DecimalMarks = "HS019";
+    public const string ExactlyOne = "HS020";
+    public const string Rule = "HS021";
+    public const string UnknownSpectrum = "HS022";
+    public const string NoFundamental = "HS023";
+    public const string UnknownElement = "HS024";
+    public const string UnknownSetting = "HS025";
+    public const string SettingKind = "HS026";
+    public const string ReservedState = "HS027";
+    public const string RepeatedSetting = "HS028";
+    public const string SameBus = "HS029";
+    public const string CouplerVoltages = "HS030";
+    public const string GeneratorVoltages = "HS031";
+    public const string TomlSyntax = "HS032";
+    public const string UnknownKey = "HS033";
+    public const string KeyType = "HS034";
+    public const string MissingKey = "HS035";
+    public const string KeyRange = "HS036";
+    public const string PccUnknown = "HS037";
+    public const string UnknownStandard = "HS038";
+    public const string NoBuses = "HS039";
+    public const string NoSource = "HS040";
+    public const string NoTables = "HS041";
+    public const string RepeatedOrder = "HS042";
+    public const string FolderInUse = "HS043";
+    public const string NoPcc = "HS101";
+    public const string RatedAgainstNominal = "HS102";
+    public const string Sides = "HS103";
+    public const string LooksLikeKva = "HS104";
+    public const string LooksLikeWatt = "HS105";
+    public const string BankVoltage = "HS106";
+    public const string LooksLikeMetres = "HS107";
+    public const string XOverR = "HS108";
+    public const string Impedance = "HS109";
+    public const string SpectrumLine = "HS110";
+    public const string LooksLikeVolts = "HS111";
+    public const string Frequency = "HS112";
+    public const string LooksLikeFraction = "HS113";
+    public const string ShortCircuit = "HS114";
+    public const string UnusedSpectrum = "HS115";
+}

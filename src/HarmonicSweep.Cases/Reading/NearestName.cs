@@ -1,0 +1,54 @@
+namespace HarmonicSweep.Cases.Reading;
+
+/// <summary>The known name a mistyped one most likely stands for.</summary>
+public static class NearestName
+{
+    /// <summary>
+    /// The candidate at the smallest edit distance (Levenshtein 1966), letter case left out; null when none is within a third of
+    /// the length.
+    /// </summary>
+    public static string? Of(string word, IEnumerable<string> candidates)
+    {
+        string lower = word.ToLowerInvariant();
+        string? best = null;
+        int least = Math.Max(2, word.Length / 3) + 1;
+        foreach (string candidate in candidates)
+        {
+            int distance = Distance(lower, candidate.ToLowerInvariant());
+            if (distance < least)
+            {
+                least = distance;
+                best = candidate;
+            }
+        }
+
+        return best;
+    }
+
+    /// <summary>A remedy that begins with the suggestion, when there is one.</summary>
+    public static string Suggest(string word, IEnumerable<string> candidates, string otherwise) =>
+        Of(word, candidates) is { } nearest ? $"did you mean '{nearest}'? Otherwise {otherwise}" : otherwise;
+
+    private static int Distance(string a, string b)
+    {
+        int[] row = new int[b.Length + 1];
+        for (int j = 0; j <= b.Length; j++)
+        {
+            row[j] = j;
+        }
+
+        for (int i = 1; i <= a.Length; i++)
+        {
+            int diagonal = row[0];
+            row[0] = i;
+            for (int j = 1; j <= b.Length; j++)
+            {
+                int substitution = diagonal + (a[i - 1] == b[j - 1] ? 0 : 1);
+                diagonal = row[j];
+                row[j] = Math.Min(substitution, Math.Min(row[j], row[j - 1]) + 1);
+            }
+        }
+
+        return row[b.Length];
+    }
+}

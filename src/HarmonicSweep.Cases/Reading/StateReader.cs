@@ -1,0 +1,121 @@
+using System.Globalization;
+using HarmonicSweep.Cases.Schema;
+using HarmonicSweep.Network;
+
+namespace HarmonicSweep.Cases.Reading;
+
+/// <summary>Reads states.csv into operating states.</summary>
+internal static class StateReader
+{
+    private static readonly string[] _settings = ["in", "out", "steps=2", "sc=min", "sc=max", "sc=250", "tap=-2.5", "loading=60"];
+
+    /// <summary>The states in the order of their first row, base first.</summary>
+    /// <param name="rows">Rows of states.csv.</param>
+    /// <param name="elements">Elements that were built.</param>
+    /// <param name="names">Every name of the case, those of rows with errors included, so that one mistake is not reported twice.</param>
+    /// <param name="busNames">Names of buses.</param>
+    public static List<OperatingState> Read(
+        IReadOnlyList<Row> rows, IReadOnlyDictionary<string, PlantElement> elements, IReadOnlyCollection<string> names, IReadOnlySet<string> busNames)
+    {
+        var states = new List<OperatingState> { OperatingState.Base };
+        foreach (IGrouping<string, Row> group in rows.GroupBy(r => r.Text("state")))
+        {
+            Row first = group.First();
+            if (group.Key.Equals(OperatingState.BaseName, StringComparison.OrdinalIgnoreCase) || group.Key.Equals("all", StringComparison.OrdinalIgnoreCase))
+            {
+                first.Error(Ids.ReservedState, "state", $"'{group.Key}' is a reserved name: base is the plant as drawn, all means every state.", "give the state another name.");
+                continue;
+            }
+
+            var settings = new List<StateSetting>();
+            foreach (Row row in group)
+            {
+                if (Setting(row, elements, names, busNames) is not { } setting)
+                {
+                    continue;
+                }
+
+                if (settings.Any(s => s.Element == setting.Element && s.GetType() == setting.GetType()))
+                {
+                    row.Error(Ids.RepeatedSetting, "setting", $"state {group.Key} sets {setting.Element} twice in the same way.", "keep one of the rows.");
+                    continue;
+                }
+
+                settings.Add(setting);
+            }
+
+            states.Add(new OperatingState(group.Key, settings));
+        }
+
+        return states;
+    }
+
+    private static StateSetting? Setting(
+        Row row, IReadOnlyDictionary<string, PlantElement> elements, IReadOnlyCollection<string> names, IReadOnlySet<string> busNames)
+    {
+        string name = row.Text("element");
+        if (!elements.TryGetValue(name, out PlantElement? element))
+        {
+            if (busNames.Contains(name))
+            {
+                row.Error(Ids.UnknownElement, "element", $"'{name}' is a bus; expected an element (a bus goes out with what connects it).", "name the coupler, transformer or line that connects it.");
+            }
+            else if (!names.Contains(name))
+            {
+                row.Error(Ids.UnknownElement, "element", $"'{name}' is no element of the plant.", NearestName.Suggest(name, names.Where(n => !busNames.Contains(n)), "add it to its table, or correct the name."));
+            }
+
+            return null;
+        }
+
+        string text = row.Text("setting").ToLowerInvariant().Replace(" ", "", StringComparison.Ordinal);
+        if (text is "in" or "out")
+        {
+            return new ServiceSetting(name, text == "in");
+        }
+
+        int equals = text.IndexOf('=');
+        string key = equals < 0 ? text : text[..equals];
+        string value = equals < 0 ? "" : text[(equals + 1)..];
+        double? number = double.TryParse(value.Replace(',', '.'), NumberStyles.Float, CultureInfo.InvariantCulture, out double n) && double.IsFinite(n) ? n : null;
+        switch (key, element)
+        {
+            case ("steps", CapacitorBank bank):
+                return number is { } steps && steps == Math.Floor(steps) && steps >= 0 && steps <= bank.Steps
+                    ? new StepsSetting(name, (int)steps)
+                    : OutOfRange(row, $"a whole number from 0 to {((double)bank.Steps).Plain()}, the steps of {name}");
+            case ("sc", Supply):
+                return value is "min" or "max" ? new ShortCircuitSetting(name, value == "min" ? ShortCircuitLevel.Min : ShortCircuitLevel.Max)
+                    : number > 0 ? new ShortCircuitSetting(name, new ShortCircuitLevel(number, false))
+                    : OutOfRange(row, "min, max or a number above 0 in MVA");
+            case ("tap", Transformer):
+                return number is { } tap && Math.Abs(tap) <= 30 ? new TapSetting(name, tap) : OutOfRange(row, "a number from -30 to 30 in percent");
+            case ("loading", LinearLoad or Motor or Converter):
+                return number is >= 0 and <= 300 ? new LoadingSetting(name, number.Value) : OutOfRange(row, "a number from 0 to 300 in percent");
+            case ("steps" or "sc" or "tap" or "loading", _):
+                row.Error(
+                    Ids.SettingKind, "setting", $"'{row.Text("setting")}' does not apply to {name}; expected {Legal(element)}.", "correct the setting or the element.");
+                return null;
+            default:
+                row.Error(
+                    Ids.UnknownSetting, "setting", $"setting '{row.Text("setting")}' is not known; expected {Legal(element)}.",
+                    NearestName.Suggest(key, ["in", "out", "steps=", "sc=", "tap=", "loading="], $"write for example {string.Join(", ", _settings)}."));
+                return null;
+        }
+    }
+
+    private static string Legal(PlantElement element) => "in, out" + element switch
+    {
+        CapacitorBank => " or steps=NUMBER",
+        Supply => ", sc=min, sc=max or sc=MVA",
+        Transformer => " or tap=PERCENT",
+        LinearLoad or Motor or Converter => " or loading=PERCENT",
+        _ => "",
+    };
+
+    private static StateSetting? OutOfRange(Row row, string expected)
+    {
+        row.Error(Ids.OutOfRange, "setting", $"setting is '{row.Text("setting")}'; expected {expected}.", "correct the number.");
+        return null;
+    }
+}

@@ -1,0 +1,43 @@
+using HarmonicSweep.Cases;
+using HarmonicSweep.Network;
+using HarmonicSweep.Reports.Pictures;
+using HarmonicSweep.Studies;
+
+namespace HarmonicSweep.Cli;
+
+/// <content>The workshop of the program itself.</content>
+internal sealed partial record Workshop
+{
+    /// <summary>The readers, studies and plots of the program.</summary>
+    public static Workshop Real { get; } = new()
+    {
+        ReadCase = static folder => Read(folder),
+        NewCase = static folder => CaseTemplate.Write(folder),
+        DrawPlots = Draw,
+        Check = static (request, progress, cancellation) => CheckStudy.Run(request, progress, cancellation),
+        Impedance = static (request, progress, cancellation) => ImpedanceStudy.Run(request, progress, cancellation),
+        Distortion = static (request, progress, cancellation) => DistortionStudy.Run(request, progress, cancellation),
+        Screen = static (request, progress, cancellation) => ScreenStudy.Run(request, progress, cancellation),
+        Main = static (request, progress, cancellation) => MainStudy.Run(request, progress, cancellation),
+    };
+
+    private static (CaseFile? Case, IReadOnlyList<Finding> Findings) Read(string folder)
+    {
+        CaseReadResult read = CaseReader.Read(folder);
+        return (read.Case, read.Findings);
+    }
+
+    private static IReadOnlyList<Finding> Draw(
+        CaseFile caseFile, StudyResult result, string folder, int threads, CancellationToken cancellation)
+    {
+        IReadOnlyList<Picture> pictures = PictureBook.Plan(caseFile.Plant.Title, result, caseFile.Settings);
+        PictureBook.Write(pictures, folder, threads, cancellation);
+        IReadOnlyList<string> missing = PictureBook.MissingCharacters(pictures);
+        return missing.Count == 0 ? [] :
+        [
+            new Finding(
+                Severity.Warning, "HS907", null, $"the PNG plots show a box for {string.Join(' ', missing)}, which their font lacks; the SVG plots have them.",
+                "use the SVG plots, or other letters in titles and bus names."),
+        ];
+    }
+}
