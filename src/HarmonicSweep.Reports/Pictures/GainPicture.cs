@@ -62,7 +62,7 @@ internal static class GainPicture
             panel.DrawAcross(sheet, "Order h (frequency / fundamental)");
             if (drawn.All(g => g.Peak is 0))
             {
-                panel.DrawRemark(sheet, "no gain at any order");
+                panel.DrawRemark(sheet, "open: no path from the background at any order");
             }
 
             Legend.Draw(sheet, legend, Picture.Margin, legendTop, Picture.Width - 2 * Picture.Margin);
@@ -90,7 +90,7 @@ internal static class GainPicture
     {
         if (gain.Peak is 0)
         {
-            return ["no gain"];
+            return ["open at every order"];
         }
 
         string peak = $"largest {Figures.Short(gain.Peak)} at order {Figures.ComputedOrder(gain.PeakOrder)}";
