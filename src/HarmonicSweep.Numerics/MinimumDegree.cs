@@ -11,32 +11,46 @@ public static class MinimumDegree
     {
         int size = pattern.Size;
         var neighbours = new HashSet<int>[size];
-        var queue = new SortedSet<(int Degree, int Node)>();
         for (int i = 0; i < size; i++)
         {
             neighbours[i] = [.. pattern.Row(i)];
             neighbours[i].Remove(i);
-            queue.Add((neighbours[i].Count, i));
         }
 
         int[] order = new int[size];
+        bool[] eliminated = new bool[size];
         for (int k = 0; k < size; k++)
         {
-            (int degree, int node) = queue.Min;
-            queue.Remove((degree, node));
+            int node = Least(neighbours, eliminated);
+            eliminated[node] = true;
             order[k] = node;
             foreach (int a in neighbours[node])
             {
-                queue.Remove((neighbours[a].Count, a));
                 neighbours[a].Remove(node);
-                neighbours[a].UnionWith(neighbours[node]);
-                neighbours[a].Remove(a);
-                queue.Add((neighbours[a].Count, a));
+                foreach (int b in neighbours[node])
+                {
+                    if (b != a)
+                    {
+                        neighbours[a].Add(b);
+                    }
+                }
             }
-
-            neighbours[node].Clear();
         }
 
         return order;
+    }
+
+    private static int Least(HashSet<int>[] neighbours, bool[] eliminated)
+    {
+        int best = -1;
+        for (int i = 0; i < neighbours.Length; i++)
+        {
+            if (!eliminated[i] && (best < 0 || neighbours[i].Count < neighbours[best].Count))
+            {
+                best = i;
+            }
+        }
+
+        return best;
     }
 }

@@ -96,28 +96,42 @@ public sealed class SparseAnalysis
     private static int[][] FillBelow(SparsityPattern pattern, int[] order, int[] rank)
     {
         int size = pattern.Size;
-        var sets = new SortedSet<int>[size];
+        int[][] below = new int[size][];
+        var children = new List<int>?[size];
+        int[] seen = new int[size];
+        Array.Fill(seen, -1);
+        var rows = new List<int>();
         for (int k = 0; k < size; k++)
         {
-            sets[k] = [];
+            rows.Clear();
+            seen[k] = k;
             foreach (int column in pattern.Row(order[k]))
             {
-                if (rank[column] > k)
+                Add(rank[column]);
+            }
+
+            foreach (int child in children[k] ?? [])
+            {
+                foreach (int row in below[child])
                 {
-                    sets[k].Add(rank[column]);
+                    Add(row);
                 }
             }
-        }
 
-        int[][] below = new int[size][];
-        for (int k = 0; k < size; k++)
-        {
-            below[k] = [.. sets[k]];
+            rows.Sort();
+            below[k] = [.. rows];
             if (below[k].Length > 0)
             {
-                int parent = below[k][0];
-                sets[parent].UnionWith(below[k]);
-                sets[parent].Remove(parent);
+                (children[below[k][0]] ??= []).Add(k);
+            }
+
+            void Add(int row)
+            {
+                if (row > k && seen[row] != k)
+                {
+                    seen[row] = k;
+                    rows.Add(row);
+                }
             }
         }
 

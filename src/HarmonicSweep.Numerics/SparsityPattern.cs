@@ -17,32 +17,42 @@ public sealed class SparsityPattern
     public SparsityPattern(int size, IEnumerable<(int Row, int Column)> pairs)
     {
         ArgumentOutOfRangeException.ThrowIfNegative(size);
-        var rows = new SortedSet<int>[size];
+        var entries = new List<(int Row, int Column)>();
         for (int i = 0; i < size; i++)
         {
-            rows[i] = [i];
+            entries.Add((i, i));
         }
 
         foreach ((int row, int column) in pairs)
         {
             ArgumentOutOfRangeException.ThrowIfNegative(Math.Min(row, column), nameof(pairs));
             ArgumentOutOfRangeException.ThrowIfGreaterThanOrEqual(Math.Max(row, column), size, nameof(pairs));
-            rows[row].Add(column);
-            rows[column].Add(row);
+            entries.Add((row, column));
+            entries.Add((column, row));
         }
 
+        entries.Sort(static (a, b) => a.Row != b.Row ? a.Row.CompareTo(b.Row) : a.Column.CompareTo(b.Column));
+        var columns = new List<int>(entries.Count);
         _rowStart = new int[size + 1];
-        for (int i = 0; i < size; i++)
+        _diagonal = new int[size];
+        for (int e = 0; e < entries.Count; e++)
         {
-            _rowStart[i + 1] = _rowStart[i] + rows[i].Count;
+            if (e > 0 && entries[e] == entries[e - 1])
+            {
+                continue;
+            }
+
+            (int row, int column) = entries[e];
+            if (row == column)
+            {
+                _diagonal[row] = columns.Count;
+            }
+
+            columns.Add(column);
+            _rowStart[row + 1] = columns.Count;
         }
 
-        _columns = [.. rows.SelectMany(r => r)];
-        _diagonal = new int[size];
-        for (int i = 0; i < size; i++)
-        {
-            _diagonal[i] = IndexOf(i, i);
-        }
+        _columns = [.. columns];
     }
 
     /// <summary>Rows and columns.</summary>

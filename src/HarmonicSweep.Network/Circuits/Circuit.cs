@@ -46,34 +46,48 @@ public sealed class Circuit
 {
     private readonly int[] _rowOfNode;
     private readonly double[] _kvOfNode;
-    private readonly (int AA, int AB, int BA, int BB, double Scale)[] _branchStamps;
+    private readonly int[] _nodeOfRow;
+    private readonly CircuitBranch[] _branches;
+    private readonly CircuitShunt[] _shunts;
+    private readonly BranchStamp[] _branchStamps;
+    private readonly ShuntStamp[] _shuntStamps;
 
-    private Circuit(
-        PlantInState plant, NodeMap nodes, Sequence sequence, List<CircuitBranch> branches, List<CircuitShunt> shunts, bool keepOpen)
+    private Circuit(PlantInState plant, NodeMap nodes, Sequence sequence, CircuitBranch[] branches, CircuitShunt[] shunts, bool keepOpen)
     {
         Plant = plant;
         Nodes = nodes;
         Sequence = sequence;
-        Branches = branches;
-        Shunts = shunts;
+        _branches = branches;
+        _shunts = shunts;
         _kvOfNode = new double[nodes.Count];
         for (int node = 0; node < nodes.Count; node++)
         {
             _kvOfNode[node] = plant.Plant.Bus(nodes.BusesOf(node)[0]).NominalKv;
         }
 
-        _rowOfNode = RowsOfNodes(nodes.Count, branches, shunts, keepOpen, out int size);
-        Pattern = new SparsityPattern(size, branches.Where(b => RowOf(b.NodeA) >= 0).Select(b => (RowOf(b.NodeA), RowOf(b.NodeB))));
+        _rowOfNode = RowsOfNodes(nodes.Count, branches, shunts, keepOpen, out _nodeOfRow);
+        Pattern = new SparsityPattern(
+            _nodeOfRow.Length, branches.Where(b => RowOf(b.NodeA) >= 0).Select(b => (RowOf(b.NodeA), RowOf(b.NodeB))));
         Analysis = SparseAnalysis.Of(Pattern);
         _branchStamps = [.. branches.Select(LocateStamp)];
-        NodeOfRow = new int[size];
-        for (int node = 0; node < nodes.Count; node++)
-        {
-            if (_rowOfNode[node] >= 0)
-            {
-                ((int[])NodeOfRow)[_rowOfNode[node]] = node;
-            }
-        }
+        _shuntStamps = [.. shunts.Select(LocateStamp)];
+    }
+
+    /// <summary>The same circuit with the laws of another sequence: nodes, pattern and analysis are shared.</summary>
+    private Circuit(Circuit other, Sequence sequence, CircuitBranch[] branches)
+    {
+        Plant = other.Plant;
+        Nodes = other.Nodes;
+        Sequence = sequence;
+        Pattern = other.Pattern;
+        Analysis = other.Analysis;
+        _branches = branches;
+        _shunts = other._shunts;
+        _kvOfNode = other._kvOfNode;
+        _rowOfNode = other._rowOfNode;
+        _nodeOfRow = other._nodeOfRow;
+        _branchStamps = other._branchStamps;
+        _shuntStamps = other._shuntStamps;
     }
 
     /// <summary>Plant and state.</summary>
@@ -86,10 +100,10 @@ public sealed class Circuit
     public Sequence Sequence { get; }
 
     /// <summary>Elements between two nodes, in plant order.</summary>
-    public IReadOnlyList<CircuitBranch> Branches { get; }
+    public IReadOnlyList<CircuitBranch> Branches => _branches;
 
     /// <summary>Elements to ground, in plant order.</summary>
-    public IReadOnlyList<CircuitShunt> Shunts { get; }
+    public IReadOnlyList<CircuitShunt> Shunts => _shunts;
 
     /// <summary>Pattern of the nodal matrix over the nodes with a path to ground.</summary>
     public SparsityPattern Pattern { get; }
@@ -98,7 +112,7 @@ public sealed class Circuit
     public SparseAnalysis Analysis { get; }
 
     /// <summary>Node of each matrix row.</summary>
-    public IReadOnlyList<int> NodeOfRow { get; }
+    public IReadOnlyList<int> NodeOfRow => _nodeOfRow;
 
     /// <summary>Builds the circuit of a plant in a state.</summary>
     /// <param name="plant">Plant and state.</param>
@@ -133,7 +147,19 @@ public sealed class Circuit
             }
         }
 
-        return new Circuit(plant, nodes, sequence, branches, shunts, keepOpen: scope == CircuitScope.PowerFlow);
+        return new Circuit(plant, nodes, sequence, [.. branches], [.. shunts], keepOpen: scope == CircuitScope.PowerFlow);
+    }
+
+    /// <summary>
+    /// The same circuit in the other sequence. Positive and negative sequence differ in the phase shift of transformers alone.
+    /// </summary>
+    /// <exception cref="ArgumentOutOfRangeException">The sequence is zero.</exception>
+    public Circuit InSequence(Sequence sequence)
+    {
+        ArgumentOutOfRangeException.ThrowIfEqual(sequence, Sequence.Zero);
+        return sequence == Sequence ? this : new Circuit(this, sequence, [.. _branches.Select(b => b.Element is Transformer transformer
+            ? b with { Law = new TransformerLaw(transformer, Plant.TapPercent(transformer), sequence) }
+            : b)]);
     }
 
     /// <summary>Matrix row of a node; -1 when the node is open.</summary>
@@ -154,43 +180,43 @@ public sealed class Circuit
         values.Clear();
         for (int i = 0; i < _branchStamps.Length; i++)
         {
-            (int aa, int ab, int ba, int bb, double scale) = _branchStamps[i];
-            if (aa < 0)
+            ref readonly BranchStamp stamp = ref _branchStamps[i];
+            if (stamp.AA < 0)
             {
                 continue;
             }
 
-            CircuitBranch branch = Branches[i];
-            TwoPort y = branch.Law.Admittance(order);
-            double kvA = _kvOfNode[branch.NodeA];
-            double kvB = _kvOfNode[branch.NodeB];
-            values[aa] += y.AA * (kvA * kvA);
-            values[ab] += y.AB * scale;
-            values[ba] += y.BA * scale;
-            values[bb] += y.BB * (kvB * kvB);
+            TwoPort y = _branches[i].Law.Admittance(order);
+            values[stamp.AA] += y.AA * stamp.ScaleAA;
+            values[stamp.AB] += y.AB * stamp.ScaleAB;
+            values[stamp.BA] += y.BA * stamp.ScaleAB;
+            values[stamp.BB] += y.BB * stamp.ScaleBB;
         }
 
-        ReadOnlySpan<int> diagonal = Pattern.Diagonal;
-        foreach (CircuitShunt shunt in Shunts)
+        for (int i = 0; i < _shuntStamps.Length; i++)
         {
-            double kv = _kvOfNode[shunt.Node];
-            values[diagonal[_rowOfNode[shunt.Node]]] += shunt.Law.Admittance(order) * (kv * kv);
+            values[_shuntStamps[i].Diagonal] += _shunts[i].Law.Admittance(order) * _shuntStamps[i].Scale;
         }
     }
 
-    private (int AA, int AB, int BA, int BB, double Scale) LocateStamp(CircuitBranch branch)
+    private BranchStamp LocateStamp(CircuitBranch branch)
     {
         int a = RowOf(branch.NodeA);
         int b = RowOf(branch.NodeB);
+        double kvA = _kvOfNode[branch.NodeA];
+        double kvB = _kvOfNode[branch.NodeB];
         return a < 0
-            ? (-1, -1, -1, -1, 0)
-            : (Pattern.IndexOf(a, a), Pattern.IndexOf(a, b), Pattern.IndexOf(b, a), Pattern.IndexOf(b, b),
-                _kvOfNode[branch.NodeA] * _kvOfNode[branch.NodeB]);
+            ? new BranchStamp(-1, -1, -1, -1, 0, 0, 0)
+            : new BranchStamp(
+                Pattern.IndexOf(a, a), Pattern.IndexOf(a, b), Pattern.IndexOf(b, a), Pattern.IndexOf(b, b), kvA * kvA, kvA * kvB, kvB * kvB);
     }
+
+    private ShuntStamp LocateStamp(CircuitShunt shunt) =>
+        new(Pattern.Diagonal[RowOf(shunt.Node)], _kvOfNode[shunt.Node] * _kvOfNode[shunt.Node]);
 
     /// <summary>Row of every node that is connected to an element that reaches ground; -1 for the others.</summary>
     private static int[] RowsOfNodes(
-        int nodeCount, List<CircuitBranch> branches, List<CircuitShunt> shunts, bool keepOpen, out int size)
+        int nodeCount, CircuitBranch[] branches, CircuitShunt[] shunts, bool keepOpen, out int[] nodeOfRow)
     {
         var islands = new DisjointSets(nodeCount);
         foreach (CircuitBranch branch in branches)
@@ -210,12 +236,24 @@ public sealed class Circuit
         }
 
         int[] rows = new int[nodeCount];
-        size = 0;
+        var nodes = new List<int>(nodeCount);
         for (int node = 0; node < nodeCount; node++)
         {
-            rows[node] = keepOpen || grounded[islands.Find(node)] ? size++ : -1;
+            rows[node] = -1;
+            if (keepOpen || grounded[islands.Find(node)])
+            {
+                rows[node] = nodes.Count;
+                nodes.Add(node);
+            }
         }
 
+        nodeOfRow = [.. nodes];
         return rows;
     }
+
+    /// <summary>Where a branch goes in the values of the pattern, and what turns siemens into per unit there; AA = -1 for an open branch.</summary>
+    private readonly record struct BranchStamp(int AA, int AB, int BA, int BB, double ScaleAA, double ScaleAB, double ScaleBB);
+
+    /// <summary>Where a shunt goes, and what turns siemens into per unit there.</summary>
+    private readonly record struct ShuntStamp(int Diagonal, double Scale);
 }

@@ -31,6 +31,7 @@ public sealed class PowerFlow
     private readonly Complex[] _admittance;
     private readonly Complex[] _norton;
     private readonly Complex[] _current;
+    private readonly PowerFlowJacobian _jacobian;
     private readonly double _largestPower;
     private double _largestTerms;
     private Complex[] _voltage;
@@ -54,6 +55,7 @@ public sealed class PowerFlow
 
         _current = new Complex[size];
         _voltage = new Complex[size];
+        _jacobian = new PowerFlowJacobian(circuit.Pattern, _nodes, _admittance);
         _largestPower = _nodes.LargestMva;
     }
 
@@ -106,7 +108,7 @@ public sealed class PowerFlow
         Complex[] step;
         try
         {
-            step = new PowerFlowJacobian(_circuit.Pattern, _nodes, _admittance).Step(_voltage, _current, mismatch);
+            step = _jacobian.Step(_voltage, _current, mismatch);
         }
         catch (SingularMatrixException)
         {

@@ -12,7 +12,9 @@ internal sealed class PowerFlowStart(Circuit circuit, PowerFlowNodes nodes, Comp
     public Complex[] Voltages()
     {
         SparsityPattern pattern = circuit.Pattern;
-        var values = (Complex[])admittance.Clone();
+        var solver = new NodalSolver(circuit.Analysis);
+        Span<Complex> values = solver.Values;
+        admittance.CopyTo(values);
         var right = (Complex[])norton.Clone();
         for (int row = 0; row < pattern.Size; row++)
         {
@@ -24,7 +26,8 @@ internal sealed class PowerFlowStart(Circuit circuit, PowerFlowNodes nodes, Comp
         }
 
         var voltage = new Complex[pattern.Size];
-        PivotingLu.Factor(pattern, values).Solve(right, voltage);
+        solver.Factor();
+        solver.Solve(right, voltage);
         for (int row = 0; row < pattern.Size; row++)
         {
             if (nodes.Kind[row] == NodeKind.HeldVoltage)
@@ -37,7 +40,7 @@ internal sealed class PowerFlowStart(Circuit circuit, PowerFlowNodes nodes, Comp
     }
 
     /// <summary>Replaces a row by V = given.</summary>
-    private void Fix(Complex[] values, Complex[] right, int row, Complex given)
+    private void Fix(Span<Complex> values, Complex[] right, int row, Complex given)
     {
         SparsityPattern pattern = circuit.Pattern;
         for (int p = pattern.RowStart[row]; p < pattern.RowStart[row + 1]; p++)

@@ -10,20 +10,25 @@ namespace HarmonicSweep.Studies;
 internal sealed class HarmonicSolver
 {
     private readonly PlantInState _plant;
-    private readonly PowerFlowSolution _powerFlow;
     private readonly HarmonicSource[] _sources;
+    private readonly HashSet<double>[] _orders;
+    private readonly Circuit _circuit;
     private readonly Dictionary<Sequence, CircuitSolver> _solvers = [];
+    private readonly PlantElement[] _givenCurrents;
 
     public HarmonicSolver(PlantInState plant, PowerFlowSolution powerFlow)
     {
         _plant = plant;
-        _powerFlow = powerFlow;
         _sources = HarmonicSources.Of(plant, powerFlow);
+        _orders = [.. _sources.Select(s => s.Orders.ToHashSet())];
+        _circuit = Circuit.Build(plant, CircuitScope.Harmonic);
+        var inCircuit = new HashSet<PlantElement>(_circuit.Shunts.Select(s => s.Element), ReferenceEqualityComparer.Instance);
+        _givenCurrents = [.. plant.Plant.Elements.Where(e => e is ShuntElement && plant.IsIn(e) && !inCircuit.Contains(e))];
     }
 
     /// <summary>Orders other than 1 that some source has and that can be solved, ascending.</summary>
     public IReadOnlyList<double> SourceOrders =>
-        [.. _sources.SelectMany(s => s.Orders).Where(h => h != 1 && HarmonicOrder.SequenceOf(h) != Sequence.Zero).Distinct().Order()];
+        [.. _orders.SelectMany(o => o).Where(h => h != 1 && HarmonicOrder.SequenceOf(h) != Sequence.Zero).Distinct().Order()];
 
     /// <summary>Largest backward error of all solves so far.</summary>
     public double WorstBackwardError => _solvers.Values.Select(s => s.WorstBackwardError).DefaultIfEmpty(0).Max();
@@ -34,7 +39,7 @@ internal sealed class HarmonicSolver
         Sequence sequence = HarmonicOrder.SequenceOf(order);
         CircuitSolver solver = SolverOf(sequence == Sequence.Zero ? Sequence.Positive : sequence);
         Circuit circuit = solver.Circuit;
-        bool silent = sequence == Sequence.Zero || !_sources.Any(s => s.Orders.Contains(order));
+        bool silent = sequence == Sequence.Zero || !Array.Exists(_orders, o => o.Contains(order));
         var perUnit = new Complex[_sources.Length][];
         if (!silent && circuit.Pattern.Size > 0)
         {
@@ -44,7 +49,7 @@ internal sealed class HarmonicSolver
         for (int s = 0; s < _sources.Length; s++)
         {
             perUnit[s] = new Complex[circuit.Pattern.Size];
-            if (!silent && _sources[s].Orders.Contains(order))
+            if (!silent && _orders[s].Contains(order))
             {
                 var injection = new Complex[circuit.Pattern.Size];
                 if (Inject(circuit, _sources[s], order, injection))
@@ -61,7 +66,7 @@ internal sealed class HarmonicSolver
     {
         if (!_solvers.TryGetValue(sequence, out CircuitSolver? solver))
         {
-            _solvers[sequence] = solver = new CircuitSolver(Circuit.Build(_plant, CircuitScope.Harmonic, sequence));
+            _solvers[sequence] = solver = new CircuitSolver(_circuit.InSequence(sequence));
         }
 
         return solver;
@@ -145,14 +150,9 @@ internal sealed class HarmonicSolver
     /// <summary>What converters draw, and the nothing that loads open to harmonics draw.</summary>
     private IEnumerable<EndCurrent> SourceCurrents(Circuit circuit, double order, bool silent)
     {
-        var inCircuit = new HashSet<PlantElement>(circuit.Shunts.Select(s => s.Element), ReferenceEqualityComparer.Instance);
-        foreach (PlantElement element in _plant.Plant.Elements)
+        foreach (PlantElement element in _givenCurrents)
         {
-            if (element is not ShuntElement shunt || !_plant.IsIn(element) || inCircuit.Contains(element))
-            {
-                continue;
-            }
-
+            var shunt = (ShuntElement)element;
             var ampere = new Complex[_sources.Length];
             for (int s = 0; s < ampere.Length; s++)
             {
