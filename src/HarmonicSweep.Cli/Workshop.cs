@@ -10,7 +10,7 @@ internal delegate StudyResult RunStudy(StudyRequest request, IProgress<double>? 
 /// <summary>Draws the plots of a result into a folder, each as PNG and SVG.</summary>
 /// <returns>What a reader of the plots must know.</returns>
 internal delegate IReadOnlyList<Finding> DrawPlots(
-    CaseFile caseFile, StudyResult result, string folder, int threads, CancellationToken cancellation);
+    CaseFile caseFile, StudyRequest request, StudyResult result, string folder, CancellationToken cancellation);
 
 /// <summary>What the commands call. Every member is a method of its own, so that help loads none of their libraries.</summary>
 internal sealed partial record Workshop

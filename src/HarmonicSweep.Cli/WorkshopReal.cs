@@ -22,10 +22,10 @@ internal sealed partial record Workshop
     };
 
     private static IReadOnlyList<Finding> Draw(
-        CaseFile caseFile, StudyResult result, string folder, int threads, CancellationToken cancellation)
+        CaseFile caseFile, StudyRequest request, StudyResult result, string folder, CancellationToken cancellation)
     {
-        IReadOnlyList<Picture> pictures = PictureBook.Plan(caseFile.Plant.Title, result, caseFile.Settings);
-        PictureBook.Write(pictures, folder, threads, cancellation);
+        IReadOnlyList<Picture> pictures = PictureBook.Plan(caseFile.Plant.Title, result, request.Settings, BusesWithPictures(request, result));
+        PictureBook.Write(pictures, folder, request.Threads, cancellation);
         IReadOnlyList<string> missing = PictureBook.MissingCharacters(caseFile.Plant.Title, result);
         return missing.Count == 0 ? [] :
         [
@@ -34,4 +34,13 @@ internal sealed partial record Workshop
                 "use the SVG plots, or other letters in titles and bus names."),
         ];
     }
+
+    /// <summary>
+    /// Every bus asked for; in the main job, where nobody asked, the PCC and the buses of banks and filters: the other buses
+    /// stand in the tables, and pictures take most of the time.
+    /// </summary>
+    private static IReadOnlyCollection<string> BusesWithPictures(StudyRequest request, StudyResult result) =>
+        request.Buses.Count > 0 || result.Screen is null
+            ? []
+            : [.. request.Plant.Elements.Where(e => e is CapacitorBank or Filter).Select(e => e.Terminals[0]).Append(request.Settings.PccBus ?? "").Distinct()];
 }

@@ -37,7 +37,7 @@ internal sealed class ResultOutput(CaseFile caseFile, StudyRequest request, Stud
     {
         target.WriteTables(caseFile, result);
         target.WriteText("summary.txt", text => TextReport.Write(text, View()));
-        IReadOnlyList<Finding> remarks = drawPlots(caseFile, result, target.StagingFolder, request.Threads, cancellation);
+        IReadOnlyList<Finding> remarks = drawPlots(caseFile, request, result, target.StagingFolder, cancellation);
         cancellation.ThrowIfCancellationRequested();
         IReadOnlyList<string> files = target.Commit(caseFile, result, HsweepCommand.Version);
         Headline.Write(writer, View());

@@ -1,6 +1,6 @@
 using HarmonicSweep.Network;
-using HarmonicSweep.Reports.Drawing;
 using HarmonicSweep.Studies;
+using ScottPlot;
 
 namespace HarmonicSweep.Reports.Pictures;
 
@@ -10,162 +10,114 @@ namespace HarmonicSweep.Reports.Pictures;
 /// </summary>
 internal static class ImpedancePicture
 {
-    /// <summary>With more states than these the rest become a shaded span.</summary>
-    private const int MostCurves = 8;
-
-    private const int CurvesBesideSpan = 5;
-    private const double MagnitudeHeight = 240;
-    private const double AngleHeight = 104;
-    private const double PanelGap = 12;
-    private const double LabelRoom = 34;
+    private const float MagnitudeHeight = 330;
+    private const float AngleHeight = 170;
+    private const float LeftRoom = 74;
+    private const float RightRoom = 20;
 
     /// <summary>A picture for every bus (and bus of injection, and sequence) that has curves.</summary>
     public static IEnumerable<Picture> Plan(PictureContext context)
     {
         var keys = context.Result.States.SelectMany(s => s.Impedance).Select(c => (c.Sequence, c.At, c.From)).Distinct();
-        foreach ((Sequence sequence, string at, string from) in keys)
+        foreach ((Sequence sequence, string at, string from) in keys.Where(k => context.WantsImpedance(k.At)))
         {
-            var traces = new List<ImpedanceTrace>();
-            var without = new List<string>();
-            foreach (StateResult state in context.Result.States)
+            ImpedanceTrace[] traces =
+            [
+                .. context.Result.States.SelectMany(s => s.Impedance
+                    .Where(c => c.Sequence == sequence && c.At == at && c.From == from && c.Orders.Count > 0)
+                    .Select(c => ImpedanceTrace.Of(s, c))),
+            ];
+            if (traces.Length > 0)
             {
-                ImpedanceCurve? curve = state.Impedance.FirstOrDefault(c => c.Sequence == sequence && c.At == at && c.From == from);
-                if (curve is null || curve.Orders.Count == 0)
-                {
-                    without.Add(state.State);
-                    continue;
-                }
-
-                traces.Add(ImpedanceTrace.Of(state, curve));
-            }
-
-            if (traces.Count > 0)
-            {
-                yield return Of(context, sequence, at, from, traces, without);
+                string where = at == from ? $"at {context.BusText(at)}" : $"at {context.BusText(at)}, current injected at {from}";
+                string title = $"{(at == from ? "Driving-point" : "Transfer")} impedance {where}";
+                string prefix = sequence == Sequence.Positive ? "" : sequence.ToString().ToLowerInvariant() + "-";
+                string name = $"{prefix}impedance-{at}{(at == from ? "" : $"-from-{from}")}";
+                string subtitle = $"{context.CaseTitle} · {sequence.ToString().ToLowerInvariant()} sequence · dashed: injected orders";
+                yield return new Picture(name, title, () => Draw(title, subtitle, traces));
             }
         }
     }
 
-    private static Picture Of(
-        PictureContext context, Sequence sequence, string at, string from, List<ImpedanceTrace> traces, List<string> without)
+    private static Page Draw(string title, string subtitle, ImpedanceTrace[] traces)
     {
-        string where = at == from ? $"at {context.BusText(at)}" : $"at {context.BusText(at)}, current injected at {from}";
-        string title = $"{(at == from ? "Driving-point" : "Transfer")} impedance {where}";
-        string choices = $"{sequence.ToString().ToLowerInvariant()} sequence · {context.StatesText(context.Result.States.Count)}";
+        ImpedanceTrace[] drawn = Outstanding(traces);
+        double from = traces.Min(t => t.Orders[0]);
+        double to = Math.Max(traces.Max(t => t.Orders[^1]), from + 0.1);
         double[] injected = [.. traces.SelectMany(t => t.InjectedOrders).Distinct().Order()];
-
-        bool span = traces.Count > MostCurves;
-        List<ImpedanceTrace> drawn = span ? Outstanding(traces) : traces;
-        List<LegendEntry> legend = LegendOf(drawn, at == from, span ? traces.Count : 0, without);
-        (Scale across, Scale ohm, Scale degrees) = Scales(traces);
-        double left = Panel.LeftRoom(ohm, degrees), right = Picture.Width - Picture.Margin;
-        double top = Picture.HeaderHeight + OrderMarks.Room(across, right - left, injected), bottom = top + MagnitudeHeight;
-        var magnitude = new Panel(new Box(left, top, right, bottom), across, ohm);
-        var angle = new Panel(new Box(left, bottom + PanelGap, right, bottom + PanelGap + AngleHeight), across, degrees);
-        double legendTop = angle.Area.Bottom + Panel.BottomRoom + 6;
-        double height = legendTop + Legend.Height(legend, Picture.Width - 2 * Picture.Margin) + 6;
-        string name = $"{(sequence == Sequence.Positive ? "" : sequence.ToString().ToLowerInvariant() + "-")}impedance-{at}{(at == from ? "" : $"-from-{from}")}";
-        return new Picture(name, title, context.CaseTitle, choices, height, sheet =>
+        Plot magnitude = Look.Empty(LeftRoom, RightRoom, 8, Axes.InjectedRoom);
+        Plot angle = Look.Empty(LeftRoom, RightRoom, 46, 4);
+        Axes.Orders(magnitude, from, to, labelled: false);
+        Axes.Orders(angle, from, to, labelled: true);
+        double[] ohms = [.. drawn.SelectMany(t => t.Ohm).Where(z => z > 0).Select(z => z!.Value)];
+        Axes.Logarithmic(magnitude, ohms.DefaultIfEmpty(1).Min(), ohms.DefaultIfEmpty(10).Max(), "|Z| (Ω)");
+        bool wide = drawn.Any(t => t.Degrees.Any(d => d is < -91 or > 91));
+        angle.Axes.SetLimitsY(wide ? -190 : -95, wide ? 190 : 95);
+        angle.Axes.Left.TickGenerator = Axes.Named((wide ? new[] { -180, -90, 0, 90, 180 } : [-90, -45, 0, 45, 90]).Select(d => ((double)d, Figures.Tick(d))));
+        angle.Axes.Left.Label.Text = "Angle (°)";
+        Axes.Injected(magnitude, injected, from, to, numbered: true);
+        Axes.Injected(angle, injected, from, to, numbered: false);
+        for (int i = drawn.Length - 1; i >= 0; i--) // the first state, mostly the base, comes on top
         {
-            magnitude.DrawGrid(sheet);
-            angle.DrawGrid(sheet);
-            if (span)
-            {
-                StateSpan.Draw(sheet, magnitude, traces, t => t.Ohm);
-                StateSpan.Draw(sheet, angle, traces, t => t.Degrees);
-            }
-
-            OrderMarks.DrawLines(sheet, magnitude, injected);
-            OrderMarks.DrawLines(sheet, angle, injected);
-            for (int i = drawn.Count - 1; i >= 0; i--) // the first state, mostly the base, comes on top
-            {
-                SeriesLook look = Look.Series[i % Look.Series.Length];
-                Curve.Draw(sheet, Curve.Runs(magnitude, drawn[i].Orders, drawn[i].Ohm), look);
-                Curve.Draw(sheet, Curve.Runs(angle, drawn[i].Orders, drawn[i].Degrees, 180), look);
-            }
-
-            DrawPeaks(sheet, magnitude, drawn);
-            OrderMarks.DrawNumbers(sheet, magnitude, injected);
-            magnitude.DrawFrame(sheet, "|Z| (Ω)");
-            angle.DrawFrame(sheet, "Angle (°)");
-            angle.DrawAcross(sheet, "Order h (frequency / fundamental)");
-            if (traces.TrueForAll(t => t.IsOpen))
-            {
-                magnitude.DrawRemark(sheet, "open: no path to ground at any order");
-            }
-
-            Legend.Draw(sheet, legend, Picture.Margin, legendTop, Picture.Width - 2 * Picture.Margin);
-        });
-    }
-
-    private static (Scale Across, Scale Ohm, Scale Degrees) Scales(List<ImpedanceTrace> traces)
-    {
-        LinearScale across = LinearScale.Over(traces.Min(t => t.Orders[0]), traces.Max(t => t.Orders[^1]), 12);
-        LogScale ohm = LogScale.Covering(traces.Select(t => t.Ohm), LabelRoom / MagnitudeHeight);
-        bool wide = traces.Exists(t => Array.Exists(t.Degrees, d => d is < -90.5 or > 90.5));
-        LinearScale degrees = wide ? LinearScale.Stepped(-180, 180, 90, 45) : LinearScale.Stepped(-90, 90, 45, 15);
-        return (across, ohm, degrees);
-    }
-
-    /// <summary>Marks and labels of the parallel resonances, the highest first, since a label without room is left out.</summary>
-    private static void DrawPeaks(Sheet sheet, Panel panel, List<ImpedanceTrace> drawn)
-    {
-        var labels = new Labels(panel.Area);
-        var peaks = drawn.SelectMany((t, i) => t.Peaks.Select(p => (Peak: p, Look: Look.Series[i % Look.Series.Length]))).ToList();
-        foreach ((Resonance peak, SeriesLook look) in peaks)
-        {
-            labels.ReserveMark(sheet, look, new Spot(panel.X(peak.Order), panel.Y(peak.Ohm)));
+            Curves.Add(magnitude, drawn[i].Orders, [.. drawn[i].Ohm.Select(z => z > 0 ? Math.Log10(z.Value) : (double?)null)], Look.Series[i]);
+            Curves.Add(angle, drawn[i].Orders, drawn[i].Degrees, Look.Series[i], breakAbove: 180);
         }
 
-        foreach ((Resonance peak, SeriesLook look) in peaks.OrderByDescending(p => p.Peak.Ohm))
+        MarkPeaks(magnitude, drawn, to - from);
+        if (Array.TrueForAll(drawn, t => t.IsOpen))
         {
-            labels.TryWrite(
-                sheet, new Spot(panel.X(peak.Order), panel.Y(peak.Ohm)), Look.Small with { Colour = look.Colour, Bold = true },
-                $"h {Figures.ComputedOrder(peak.Order)}", $"{Figures.Short(peak.Ohm)} Ω");
+            Curves.Remark(magnitude, (from + to) / 2, 0.5, "open: no path to ground at any order");
         }
+
+        return new Page(title, subtitle, [new Panel(magnitude, MagnitudeHeight), new Panel(angle, AngleHeight), Key.Of(Entries(drawn, traces.Length))]);
     }
 
-    /// <summary>The first state and those with the highest parallel resonances (else the highest |Z|).</summary>
-    private static List<ImpedanceTrace> Outstanding(List<ImpedanceTrace> traces)
+    /// <summary>The first state and those with the highest peaks, as many as there are looks.</summary>
+    private static ImpedanceTrace[] Outstanding(ImpedanceTrace[] traces)
     {
-        var others = traces.Skip(1).OrderByDescending(t => t.Highest).Take(CurvesBesideSpan - 1).ToHashSet();
+        var others = traces.Skip(1).OrderByDescending(t => t.Highest).Take(Look.Series.Length - 1).ToHashSet();
         return [.. traces.Where((t, i) => i == 0 || others.Contains(t))];
     }
 
-    private static List<LegendEntry> LegendOf(List<ImpedanceTrace> drawn, bool drivingPoint, int spanStates, List<string> without)
+    /// <summary>A mark on every parallel resonance; the numbers beside those of the highest, where they do not collide.</summary>
+    private static void MarkPeaks(Plot plot, ImpedanceTrace[] drawn, double span)
     {
-        var entries = new List<LegendEntry>();
-        for (int i = 0; i < drawn.Count; i++)
+        var labelled = new List<(double Order, double Log)>();
+        double height = plot.Axes.GetLimits().VerticalSpan;
+        var peaks = drawn.SelectMany((t, i) => t.Peaks.Select(p => (Peak: p, Look: Look.Series[i]))).OrderByDescending(p => p.Peak.Ohm);
+        foreach ((Resonance peak, SeriesLook look) in peaks)
         {
-            entries.Add(LegendEntry.Line(drawn[i].State, Look.Series[i % Look.Series.Length], Details(drawn[i], drivingPoint)));
-        }
-
-        if (spanStates > 0)
-        {
-            entries.Add(LegendEntry.Patch(FormattableString.Invariant($"span of all {spanStates} states"), Look.Span) with
+            double log = Math.Log10(peak.Ohm);
+            plot.Add.Marker(peak.Order, log, look.Mark, 8, look.Colour);
+            bool room = labelled.TrueForAll(l => Math.Abs(l.Order - peak.Order) > span * 0.075 || Math.Abs(l.Log - log) > height * 0.13);
+            if (room)
             {
-                Details = ["drawn as curves: the first state and those with the highest peaks"],
-            });
+                labelled.Add((peak.Order, log));
+                string text = $"{Figures.ComputedOrder(peak.Order)}\n{Figures.Short(peak.Ohm)} Ω";
+                ScottPlot.Plottables.Text label = plot.Add.Text(text, peak.Order, log);
+                label.LabelAlignment = Alignment.LowerCenter;
+                label.OffsetY = -7;
+                label.LabelFontSize = Look.SmallSize;
+                label.LabelBold = true;
+                label.LabelFontColor = look.Colour;
+                label.LabelBackgroundColor = Colors.White.WithAlpha(0.7);
+            }
         }
+    }
 
-        entries.AddRange(without.Take(MostCurves).Select(s => new LegendEntry(s, null, "bus dead or not scanned in this state")));
-        if (without.Count > MostCurves)
+    private static List<KeyEntry> Entries(ImpedanceTrace[] drawn, int states)
+    {
+        var entries = drawn.Select((t, i) => new KeyEntry($"{t.State}:  {Details(t)}", Look.Series[i])).ToList();
+        if (states > drawn.Length)
         {
-            entries.Add(new LegendEntry(FormattableString.Invariant($"and {without.Count - MostCurves} more states"), null, "likewise"));
+            entries.Add(new KeyEntry(FormattableString.Invariant(
+                $"{drawn.Length} of {states} states drawn: the first and those with the highest peaks; the tables have all")));
         }
 
         return entries;
     }
 
-    private static string[] Details(ImpedanceTrace trace, bool drivingPoint)
-    {
-        if (trace.IsOpen)
-        {
-            return ["open: no path to ground"];
-        }
-
-        return trace.Peaks.Length == 0
-            ? [drivingPoint ? "no parallel resonance in this range" : ""]
-            : ["parallel at", .. trace.Peaks.Select(p => $"{Figures.ComputedOrder(p.Order)}: {Figures.Short(p.Ohm)} Ω")];
-    }
+    private static string Details(ImpedanceTrace trace) => trace.IsOpen ? "open, no path to ground"
+        : trace.Peaks.Length == 0 ? "no parallel resonance in this range"
+        : "parallel at " + string.Join(", ", trace.Peaks.Select(p => $"{Figures.ComputedOrder(p.Order)} ({Figures.Short(p.Ohm)} Ω)"));
 }

@@ -12,9 +12,11 @@ public static class PictureBook
     /// <param name="caseTitle">Title of the case.</param>
     /// <param name="result">What was computed.</param>
     /// <param name="settings">PCC and summation rule of the study.</param>
-    public static IReadOnlyList<Picture> Plan(string caseTitle, StudyResult result, StudySettings settings)
+    /// <param name="buses">Buses that get impedance and spectrum pictures of their own; empty = all that have curves.</param>
+    public static IReadOnlyList<Picture> Plan(
+        string caseTitle, StudyResult result, StudySettings settings, IReadOnlyCollection<string> buses)
     {
-        var context = new PictureContext(caseTitle, result, settings);
+        var context = new PictureContext(caseTitle, result, settings, buses);
         IEnumerable<Picture> pictures =
         [
             .. ImpedancePicture.Plan(context),
@@ -43,7 +45,7 @@ public static class PictureBook
             .. result.States.SelectMany(s => s.Distortion).Select(d => d.Bus),
             .. result.Screen?.Maps.Select(m => m.Bank) ?? [],
         ];
-        return [.. Drawing.Roboto.Missing(string.Concat(names.Distinct()))];
+        return [.. EmbeddedFonts.Missing(string.Concat(names.Distinct()))];
     }
 
     /// <summary>Draws the pictures and writes each as PNG and SVG; an earlier picture of the same name is replaced.</summary>
@@ -62,7 +64,12 @@ public static class PictureBook
         try
         {
             var options = new ParallelOptions { MaxDegreeOfParallelism = Math.Max(1, threads), CancellationToken = cancellation };
-            Parallel.For(0, paths.Length, options, i => File.WriteAllBytes(Unfinished(paths[i]), BytesOf(pictures[i / 2], png: i % 2 == 0)));
+            // a picture is laid out once and rendered twice, by one thread
+            Parallel.For(0, pictures.Count, options, i =>
+            {
+                File.WriteAllBytes(Unfinished(paths[2 * i]), pictures[i].ToPng());
+                File.WriteAllBytes(Unfinished(paths[2 * i + 1]), pictures[i].ToSvg());
+            });
             foreach (string path in paths)
             {
                 File.Move(Unfinished(path), path, overwrite: true);
@@ -84,8 +91,6 @@ public static class PictureBook
     }
 
     private static string Unfinished(string path) => path + ".unfinished";
-
-    private static byte[] BytesOf(Picture picture, bool png) => png ? picture.ToPng() : Encoding.UTF8.GetBytes(picture.ToSvg());
 
     /// <summary>Lower-case ASCII letters, digits and single hyphens, so that the name suits every file system and address.</summary>
     private static string UniqueName(string wanted, HashSet<string> taken)

@@ -6,7 +6,8 @@ namespace HarmonicSweep.Reports.Pictures;
 /// <param name="CaseTitle">Title of the case.</param>
 /// <param name="Result">What was computed.</param>
 /// <param name="Settings">PCC, summation rule.</param>
-internal sealed record PictureContext(string CaseTitle, StudyResult Result, StudySettings Settings)
+/// <param name="Buses">Buses asked for; empty = the PCC and every bus with a bank or filter.</param>
+internal sealed record PictureContext(string CaseTitle, StudyResult Result, StudySettings Settings, IReadOnlyCollection<string> Buses)
 {
     /// <summary>The summation rule in words.</summary>
     public string RuleText => Settings.Rule switch
@@ -21,7 +22,10 @@ internal sealed record PictureContext(string CaseTitle, StudyResult Result, Stud
     public string BusText(string bus) => bus == Settings.PccBus ? $"{bus} (PCC)" : bus;
 
     /// <summary>The only state's name, or how many there are.</summary>
-    public string StatesText(int count) => count == 1
+    public string StatesText => Result.States.Count == 1
         ? $"state {Result.States[0].State}"
-        : FormattableString.Invariant($"{count} states");
+        : FormattableString.Invariant($"{Result.States.Count} states");
+
+    /// <summary>Whether a bus gets an impedance picture of its own: pictures cost time, and the tables have every bus.</summary>
+    public bool WantsImpedance(string bus) => Buses.Count == 0 || Buses.Contains(bus);
 }

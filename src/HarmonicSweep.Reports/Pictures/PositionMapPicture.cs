@@ -1,22 +1,23 @@
-using HarmonicSweep.Reports.Drawing;
+using System.Numerics;
 using HarmonicSweep.Studies;
+using ScottPlot;
+using ScottPlot.Plottables;
 
 namespace HarmonicSweep.Reports.Pictures;
 
 /// <summary>
-/// Heat map of a bank: a row a position, orders across, |Z| at its bus as shade; one panel a supply strength. Positions not
-/// to dwell on are flagged at their row.
+/// |Z| at the bus of a bank: its positions down, orders across, the shade is |Z| on a logarithmic scale; one map a supply
+/// strength, below each other. Positions not to be dwelt on are named at their row.
 /// </summary>
 internal static class PositionMapPicture
 {
-    private const int MostPanels = 3;
-    private const int MostRows = 40;
-    private const double PanelGap = 30;
-    private const double FlagRoom = 118;
+    private const int MostRows = 16;
+    private const int Columns = 400;
+    private const float RowHeight = 26;
+    private const float LeftRoom = 150;
+    private const float RightRoom = 150;
 
-    private static readonly TextStyle NameStyle = Look.Text with { Anchor = Anchor.End, Bold = true };
-
-    /// <summary>A picture a bank and base state; further ones when there are more supply strengths than fit one.</summary>
+    /// <summary>A picture for every bank in the first state it was screened in: the other states stand in the tables.</summary>
     public static IEnumerable<Picture> Plan(PictureContext context)
     {
         if (context.Result.Screen is not { } screen)
@@ -24,98 +25,143 @@ internal static class PositionMapPicture
             yield break;
         }
 
-        foreach (var bank in screen.Maps.Where(m => m.Orders.Count > 0 && m.StepsIn.Count > 0).GroupBy(m => (m.BaseState, m.Bank)))
+        foreach (IGrouping<string, PositionMap> bank in screen.Maps.GroupBy(m => m.Bank))
         {
-            var page = new List<MapSection>();
-            foreach (MapSection section in bank.SelectMany(m => MapSection.Of(screen, m, MostRows)))
+            string state = bank.First().BaseState;
+            PositionMap[] maps = [.. bank.Where(m => m.BaseState == state && m.Orders.Count > 1 && m.StepsIn.Count > 0)];
+            if (maps.Length > 0)
             {
-                if (page.Count == MostPanels || (page.Count > 0 && page.Sum(s => s.Names.Length) + section.Names.Length > MostRows))
-                {
-                    yield return Of(context, screen, [.. page]);
-                    page.Clear();
-                }
-
-                page.Add(section);
-            }
-
-            yield return Of(context, screen, [.. page]);
-        }
-    }
-
-    private static Picture Of(PictureContext context, ScreenResult screen, MapSection[] sections)
-    {
-        PositionMap first = sections[0].Map;
-        PositionMap[] maps = [.. sections.Select(s => s.Map)];
-        double[] injected = [.. maps.SelectMany(m => m.InjectedOrders).Distinct().Order()];
-        LinearScale across = LinearScale.Over(maps.Min(m => m.Orders[0]), maps.Max(m => m.Orders[^1]), 12);
-        double left = Math.Ceiling(Picture.Margin + 26 + sections.SelectMany(s => s.Names).Max(n => Roboto.Width(n, NameStyle)));
-        double right = Picture.Width - Picture.Margin - FlagRoom;
-        double above = OrderMarks.Room(across, right - left, injected) + 16, rowHeight = Math.Clamp(260.0 / sections.Max(s => s.Names.Length), 14, 24);
-        double[] tops = new double[sections.Length];
-        double y = Picture.HeaderHeight;
-        for (int i = 0; i < sections.Length; i++)
-        {
-            tops[i] = y + above;
-            y = tops[i] + sections[i].Names.Length * rowHeight + (i < sections.Length - 1 ? PanelGap : Panel.BottomRoom);
-        }
-
-        double keyTop = y + 8;
-        string choices = $"from state {first.BaseState} · bank positions down, order across";
-        return new Picture($"positions-{first.Bank}-{first.BaseState}", $"|Z| at {context.BusText(first.Bus)} over the positions of {first.Bank}", context.CaseTitle, choices, keyTop + HeatKey.Height, sheet =>
-        {
-            LogScale shade = HeatKey.ScaleOf(maps);
-            for (int i = 0; i < sections.Length; i++)
-            {
-                string[] names = sections[i].Names;
-                var area = new Box(left, tops[i], right, tops[i] + names.Length * rowHeight);
-                var panel = new Panel(area, across, new CategoryScale(names));
-                HeatRows.Draw(sheet, panel, maps[i], shade, rowHeight);
-                OrderMarks.DrawLines(sheet, panel, injected, shaded: true);
-                DrawRows(sheet, panel, sections[i].Positions, rowHeight);
-                OrderMarks.DrawNumbers(sheet, panel, injected);
-                sheet.Outline(area, Look.Frame);
-                sheet.Write($"Supply strength: {sections[i].StrengthText}", area.Left, tops[i] - above + 12, Look.Text with { Bold = true });
-                sheet.Write("Steps in", Picture.Margin + 2, (area.Top + area.Bottom) / 2, Look.AxisTitleTurned);
-                if (i == sections.Length - 1)
-                {
-                    panel.DrawAcross(sheet, "Order h");
-                }
-            }
-
-            HeatKey.Draw(sheet, shade, keyTop, screen.NearOrders);
-        });
-    }
-
-    private static void DrawRows(Sheet sheet, Panel panel, BankPosition?[] rows, double rowHeight)
-    {
-        for (int row = 0; row < rows.Length; row++)
-        {
-            double top = panel.Area.Top + row * rowHeight, middle = top + rowHeight / 2;
-            bool flagged = rows[row]?.DoNotDwell == true;
-            sheet.Line(panel.Area.Left, top, panel.Area.Right, top, new Stroke(Look.Paper, 1));
-            sheet.Write(
-                panel.Up.Ticks[row].Label!, panel.Area.Left - 7, middle + 4, NameStyle with { Bold = flagged });
-            foreach (Resonance peak in rows[row]?.ParallelResonances ?? [])
-            {
-                if (peak.Order >= panel.Across.From && peak.Order <= panel.Across.To)
-                {
-                    sheet.Mark(MarkShape.Circle, panel.X(peak.Order), middle, 3, Look.Ink);
-                }
-            }
-
-            if (flagged)
-            {
-                DrawFlag(sheet, panel.Area.Right, middle, rows[row]!.Nearest);
+                string title = $"|Z| at {context.BusText(maps[0].Bus)} over the positions of {bank.Key}";
+                yield return new Picture($"positions-{bank.Key}-{state}", title, () => Draw(context, title, screen, maps));
             }
         }
     }
 
-    private static void DrawFlag(Sheet sheet, double right, double y, Resonance? nearest)
+    private static Page Draw(PictureContext context, string title, ScreenResult screen, PositionMap[] maps)
     {
-        sheet.Polygon([new(right + 3, y), new(right + 10, y - 5), new(right + 10, y + 5)], Look.Limit);
-        string why = nearest is { NearestInjectedOrder: { } order }
-            ? $"avoid: {Figures.ComputedOrder(nearest.Order)} near {Figures.Order(order)}"
-            : "avoid";
-        sheet.Write(Roboto.Fit(why, Look.Text with { Bold = true }, FlagRoom - 14), right + 14, y + 4, Look.Text with { Bold = true, Colour = Look.Limit });
+        double[] ohms = [.. maps.SelectMany(m => m.Ohm).SelectMany(r => r).Where(z => z is { } v && v.Magnitude > 0).Select(z => z!.Value.Magnitude)];
+        var shades = new ScottPlot.Range(Math.Log10(ohms.DefaultIfEmpty(1).Min()), Math.Log10(ohms.DefaultIfEmpty(10).Max()));
+        var panels = new List<Panel>();
+        for (int i = 0; i < maps.Length; i++)
+        {
+            panels.Add(Map(screen, maps[i], shades, last: i == maps.Length - 1));
+        }
+
+        panels.Add(Scale(shades));
+        panels.Add(Key.Of(
+        [
+            new KeyEntry("parallel resonance", new SeriesLook(Look.Ink, new LinePattern([0.01f, 100], 0, "none"), MarkerShape.OpenCircle)),
+            new KeyEntry(FormattableString.Invariant($"dashed: injected orders; avoid: a parallel resonance within {screen.NearOrders} of one")),
+        ]));
+        return new Page(title, $"{context.CaseTitle} · from state {maps[0].BaseState}", panels);
+    }
+
+    private static Panel Map(ScreenResult screen, PositionMap map, ScottPlot.Range shades, bool last)
+    {
+        int[] shown = [.. Enumerable.Range(0, map.StepsIn.Count).Where(i => map.StepsIn.Count <= MostRows || i % ((map.StepsIn.Count + MostRows - 1) / MostRows) == 0)];
+        double from = map.Orders[0];
+        double to = map.Orders[^1];
+        float top = 34;
+        float bottom = last ? 46 : 12;
+        Plot plot = Look.Empty(LeftRoom, RightRoom, bottom, top);
+        Heatmap heat = plot.Add.Heatmap(Cells(map, shown));
+        heat.Position = new CoordinateRect(from, to, -0.5, shown.Length - 0.5);
+        heat.Colormap = Look.Heat;
+        heat.ManualRange = shades;
+        heat.NaNCellColor = Colors.Gray.WithAlpha(0.25);
+        Axes.Orders(plot, from, to, labelled: last);
+        plot.Axes.SetLimitsY(-0.5, shown.Length - 0.5);
+        plot.HideGrid();
+        Axes.Injected(plot, map.InjectedOrders, from, to, numbered: true);
+        BankPosition?[] positions = [.. shown.Select(i => PositionOf(screen, map, map.StepsIn[i]))];
+        int RowOf(int i) => shown.Length - 1 - i;
+        plot.Axes.Left.TickGenerator = Axes.Named(shown.Select((s, i) => ((double)RowOf(i), RowText(positions[i], map.StepsIn[s]))));
+        plot.Axes.Left.MajorTickStyle.Length = 0;
+        plot.Axes.Right.TickGenerator = Axes.Named(positions.Select((p, i) => (Row: (double)RowOf(i), Text: Advice(p))).Where(t => t.Text.Length > 0));
+        plot.Axes.Right.Range.Set(-0.5, shown.Length - 0.5);
+        plot.Axes.Right.TickLabelStyle.ForeColor = Look.Limit;
+        plot.Axes.Right.TickLabelStyle.Bold = true;
+        for (int i = 0; i < positions.Length; i++)
+        {
+            foreach (Resonance peak in positions[i]?.ParallelResonances ?? [])
+            {
+                plot.Add.Marker(peak.Order, RowOf(i), MarkerShape.FilledCircle, 8, Colors.White);
+                plot.Add.Marker(peak.Order, RowOf(i), MarkerShape.OpenCircle, 8, Look.Ink);
+            }
+        }
+
+        string strength = map.Strength.Length == 0 ? "no supply in service" : $"supply strength: {map.Strength}";
+        plot.Axes.Left.Label.Text = strength;
+        return new Panel(plot, shown.Length * RowHeight + top + bottom);
+    }
+
+    /// <summary>log10 |Z| per shown row and column; the largest of a column's points, so that no peak is lost.</summary>
+    private static double[,] Cells(PositionMap map, int[] shown)
+    {
+        int columns = Math.Min(Columns, map.Orders.Count);
+        var cells = new double[shown.Length, columns];
+        for (int row = 0; row < shown.Length; row++)
+        {
+            IReadOnlyList<Complex?> ohm = map.Ohm[shown[row]];
+            for (int column = 0; column < columns; column++)
+            {
+                int first = (int)((long)column * map.Orders.Count / columns);
+                int next = Math.Max(first + 1, (int)((long)(column + 1) * map.Orders.Count / columns));
+                double largest = double.NaN;
+                for (int i = first; i < next; i++)
+                {
+                    largest = ohm[i] is { } z && !(z.Magnitude <= largest) ? z.Magnitude : largest;
+                }
+
+                cells[row, column] = Math.Log10(largest);
+            }
+        }
+
+        return cells;
+    }
+
+    private static BankPosition? PositionOf(ScreenResult screen, PositionMap map, int steps) => screen.Positions.FirstOrDefault(
+        p => p.Bank == map.Bank && p.BaseState == map.BaseState && p.Strength == map.Strength && p.StepsIn == steps);
+
+    private static string RowText(BankPosition? position, int steps) => position is null
+        ? FormattableString.Invariant($"{steps} steps")
+        : FormattableString.Invariant($"{steps} of {position.Steps} · {position.KvarIn:0} kvar");
+
+    private static string Advice(BankPosition? position) => position switch
+    {
+        { DoNotDwell: true, Nearest: { } near } => $"avoid: {Figures.ComputedOrder(near.Order)} near {Figures.Order(near.NearestInjectedOrder!.Value)}",
+        { Loading.Overloaded: true } => "capacitors overloaded",
+        _ => "",
+    };
+
+    /// <summary>The shades as a bar with ohms.</summary>
+    private static Panel Scale(ScottPlot.Range shades)
+    {
+        Plot plot = Look.Empty(LeftRoom, 260, 40, 6);
+        var ramp = new double[1, 200];
+        for (int i = 0; i < 200; i++)
+        {
+            ramp[0, i] = shades.Min + (shades.Max - shades.Min) * i / 199;
+        }
+
+        Heatmap bar = plot.Add.Heatmap(ramp);
+        bar.Position = new CoordinateRect(shades.Min, shades.Max, 0, 1);
+        bar.ManualRange = shades;
+        bar.Colormap = Look.Heat;
+        plot.Axes.SetLimits(shades.Min, shades.Max, 0, 1);
+        plot.HideGrid();
+        plot.Axes.Left.TickGenerator = Axes.Named([]);
+        var ticks = new List<(double, string)>();
+        for (int decade = (int)Math.Floor(shades.Min); decade <= shades.Max; decade++)
+        {
+            ticks.AddRange(new[] { 1, 2, 5 }
+                .Select(d => d * Math.Pow(10, decade))
+                .Where(v => Math.Log10(v) >= shades.Min && Math.Log10(v) <= shades.Max)
+                .Select(v => (Math.Log10(v), Figures.Tick(v))));
+        }
+
+        plot.Axes.Bottom.TickGenerator = Axes.Named(ticks);
+        plot.Axes.Bottom.Label.Text = "|Z| (Ω)";
+        return new Panel(plot, 66);
     }
 }

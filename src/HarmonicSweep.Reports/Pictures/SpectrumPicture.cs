@@ -1,179 +1,97 @@
-using HarmonicSweep.Reports.Drawing;
 using HarmonicSweep.Studies;
+using ScottPlot;
 
 namespace HarmonicSweep.Reports.Pictures;
 
 /// <summary>
-/// Harmonic voltages of a bus against order, with the limits of single orders: states side by side while that can be read,
-/// else the worst state of every order, named by a letter.
+/// Harmonic voltages of a bus, percent of nominal: one bar an order with the worst state, the base state beside it where it
+/// differs, and the limit where one is judged.
 /// </summary>
 internal static class SpectrumPicture
 {
-    private const int MostBars = 110;
-    private const int MostLetters = 56;
-    private const int MostBusesUnasked = 12;
-    private const double PanelHeight = 230;
-    private const double HeadRoom = 1.12;
+    private const float Height = 320;
 
-    /// <summary>A limit further above the bars than this would flatten them: it is written instead of drawn.</summary>
-    private const double FarLimit = 5;
-
-    /// <summary>A picture for the PCC and every bus that was scanned; without a scan, for the buses with the largest THD.</summary>
+    /// <summary>A picture for every bus that has voltages above order 1 and is wanted.</summary>
     public static IEnumerable<Picture> Plan(PictureContext context)
     {
-        foreach (string bus in BusesOf(context))
+        foreach (string bus in context.Result.States.SelectMany(s => s.Voltages).Select(v => v.Bus).Distinct().Where(context.WantsImpedance))
         {
-            if (BusSpectrum.Of(context, bus) is { } spectrum)
+            if (BusSpectrum.Of(context, bus) is { LargestPercent: > 0 } spectrum)
             {
-                yield return Of(context, spectrum);
+                string title = $"Harmonic voltages at {context.BusText(bus)}";
+                yield return new Picture($"voltage-spectrum-{bus}", title, () => Draw(context, title, spectrum));
             }
         }
     }
 
-    private static IReadOnlyList<string> BusesOf(PictureContext context)
+    private static Page Draw(PictureContext context, string title, BusSpectrum spectrum)
     {
-        var withVoltages = context.Result.States.SelectMany(s => s.Voltages).Select(v => v.Bus).Distinct().ToList();
-        var scanned = context.Result.States.SelectMany(s => s.Impedance).Select(c => c.At).Append(context.Settings.PccBus).ToHashSet();
-        if (context.Result.States.Any(s => s.Impedance.Count > 0))
+        bool several = spectrum.States.Count > 1;
+        Plot plot = Look.Empty(66, 20, 46, 10);
+        Color first = Look.Series[0].Colour;
+        Color worst = Look.Series[1].Colour;
+        double offset = several ? 0.2 : 0;
+        double size = several ? 0.36 : 0.6;
+        for (int i = 0; i < spectrum.Orders.Count; i++)
         {
-            return [.. withVoltages.Where(scanned.Contains)];
+            AddBar(plot, i - offset, size, spectrum.Percent[0][i], first, spectrum.Exceeded[0][i], "");
+            if (several && spectrum.WorstState(i) is { } state)
+            {
+                AddBar(plot, i + offset, size, spectrum.Percent[state][i], worst, spectrum.Exceeded[state][i], spectrum.LetterOf(state));
+            }
         }
 
-        var worst = context.Result.States.SelectMany(s => s.Distortion)
-            .Where(d => d.Rule == context.Settings.Rule)
-            .GroupBy(d => d.Bus)
-            .OrderByDescending(g => g.Key == context.Settings.PccBus)
-            .ThenByDescending(g => g.Max(d => d.PercentOfFundamental ?? 0))
-            .Select(g => g.Key)
-            .Take(MostBusesUnasked)
-            .ToHashSet();
-        return withVoltages.Count <= MostBusesUnasked ? withVoltages : [.. withVoltages.Where(worst.Contains)];
+        double top = spectrum.LargestPercent;
+        foreach (SpectrumLimit limit in spectrum.Limits)
+        {
+            top = limit.Percent < 4 * spectrum.LargestPercent ? Math.Max(top, limit.Percent) : top;
+            ScottPlot.Plottables.LinePlot line = plot.Add.Line(limit.FirstSlot - 0.5, limit.Percent, limit.LastSlot + 0.5, limit.Percent);
+            line.LineColor = Look.Limit;
+            line.LineWidth = 2;
+        }
+
+        plot.Axes.Bottom.TickGenerator = Axes.Named(spectrum.Orders.Select((h, i) => ((double)i, Figures.Order(h))));
+        plot.Axes.Bottom.MajorTickStyle.Length = 0;
+        plot.Axes.Bottom.Label.Text = "Order h";
+        plot.Axes.Left.Label.Text = "V_h (% of nominal voltage)";
+        plot.Axes.SetLimits(-0.6, spectrum.Orders.Count - 0.4, 0, top * 1.16);
+        return new Page(
+            title, $"{context.CaseTitle} · {context.RuleText} · {context.StatesText}", [new Panel(plot, Height), Key.Of(Entries(spectrum, several, top))]);
     }
 
-    private static Picture Of(PictureContext context, BusSpectrum spectrum)
+    private static void AddBar(Plot plot, double position, double size, double? percent, Color colour, bool exceeded, string letter)
     {
-        bool beside = spectrum.States.Count <= Look.Bars.Length && spectrum.States.Count * spectrum.Orders.Count <= MostBars;
-        double largest = spectrum.LargestPercent;
-        double highestLimit = spectrum.Limits.Where(l => l.Percent <= FarLimit * largest).Select(l => l.Percent).DefaultIfEmpty(0).Max();
-        List<LegendEntry> legend = LegendOf(spectrum, beside, largest);
-        double top = Picture.HeaderHeight + 6, legendTop = top + PanelHeight + Panel.BottomRoom + 6;
-        double height = legendTop + Legend.Height(legend, Picture.Width - 2 * Picture.Margin) + 6;
-        string choices = $"{context.RuleText} · {context.StatesText(spectrum.States.Count)}";
-        return new Picture($"voltage-spectrum-{spectrum.Bus}", $"Harmonic voltages at {context.BusText(spectrum.Bus)}", context.CaseTitle, choices, height, sheet =>
+        if (percent is not { } value)
         {
-            LinearScale up = LinearScale.FromZero(Math.Max(largest * HeadRoom, highestLimit * 1.06), 6);
-            var across = new CategoryScale([.. spectrum.Orders.Select(Figures.Order)]);
-            var panel = new Panel(new Box(Panel.LeftRoom(up), top, Picture.Width - Picture.Margin, top + PanelHeight), across, up);
-            panel.DrawGrid(sheet, vertical: false);
-            DrawLimits(sheet, panel, spectrum);
-            if (beside)
-            {
-                DrawBeside(sheet, panel, spectrum);
-            }
-            else
-            {
-                DrawWorst(sheet, panel, spectrum);
-            }
+            return;
+        }
 
-            panel.DrawFrame(sheet, "Voltage (% of nominal)");
-            panel.DrawAcross(sheet, "Order h");
-            Legend.Draw(sheet, legend, Picture.Margin, legendTop, Picture.Width - 2 * Picture.Margin);
+        plot.Add.Bar(new Bar
+        {
+            Position = position, Value = value, Size = size, FillColor = colour, LineColor = exceeded ? Look.Limit : Look.Ink, LineWidth = exceeded ? 2 : 0.5f,
         });
+        ScottPlot.Plottables.Text label = plot.Add.Text(letter.Length > 0 ? $"{Figures.Percent(value)}\n{letter}" : Figures.Percent(value), position, value);
+        label.LabelAlignment = Alignment.LowerCenter;
+        label.OffsetY = -2;
+        label.LabelFontSize = Look.SmallSize - 1;
+        label.LabelFontColor = exceeded ? Look.Limit : Look.Ink;
+        label.LabelBold = exceeded;
     }
 
-    private static bool HasLetters(BusSpectrum spectrum) => spectrum.Orders.Count <= MostLetters;
-
-    private static void DrawBeside(Sheet sheet, Panel panel, BusSpectrum spectrum)
+    private static List<KeyEntry> Entries(BusSpectrum spectrum, bool several, double top)
     {
-        int count = spectrum.States.Count;
-        for (int state = 0; state < count; state++)
+        var entries = new List<KeyEntry> { new($"state {spectrum.States[0]}", Fill: Look.Series[0].Colour) };
+        if (several)
         {
-            for (int order = 0; order < spectrum.Orders.Count; order++)
-            {
-                if (spectrum.Percent[state][order] is { } percent)
-                {
-                    double width = 0.8 / count, from = order + 0.1 + state * width;
-                    DrawBar(sheet, panel, from, from + width, percent, Look.Bars[state], spectrum.Exceeded[state][order]);
-                }
-            }
-        }
-    }
-
-    private static void DrawWorst(Sheet sheet, Panel panel, BusSpectrum spectrum)
-    {
-        for (int order = 0; order < spectrum.Orders.Count; order++)
-        {
-            if (spectrum.WorstState(order) is not { } worst)
-            {
-                continue;
-            }
-
-            double percent = spectrum.Percent[worst][order]!.Value;
-            DrawBar(sheet, panel, order + 0.2, order + 0.8, percent, Look.Bars[0], spectrum.Exceeded[worst][order]);
-            double lowest = panel.Y(spectrum.Percent.Min(p => p[order])!.Value);
-            sheet.Line(panel.X(order + 0.1), lowest, panel.X(order + 0.9), lowest, new Stroke(Look.Bars[1], 2));
-            if (HasLetters(spectrum))
-            {
-                double lift = spectrum.Exceeded[worst][order] ? 12 : 3;
-                sheet.Write(
-                    spectrum.LetterOf(worst), panel.X(order + 0.5), panel.Y(percent) - lift, Look.Small with { Anchor = Anchor.Middle, Bold = true, Halo = true });
-            }
-        }
-    }
-
-    private static void DrawBar(Sheet sheet, Panel panel, double from, double to, double percent, Colour colour, bool exceeded)
-    {
-        var bar = new Box(panel.X(from), panel.Y(percent), panel.X(to), panel.Area.Bottom);
-        sheet.Fill(bar, colour);
-        if (bar.Width >= 4)
-        {
-            sheet.Outline(bar, Look.Frame with { Width = 0.5 });
+            string letters = string.Join(", ", spectrum.LetteredStates.Select(s => $"{spectrum.LetterOf(s)} = {spectrum.States[s]}"));
+            entries.Add(new KeyEntry($"worst of all states: {letters}", Fill: Look.Series[1].Colour));
         }
 
-        if (exceeded)
+        foreach (IGrouping<string, SpectrumLimit> standard in spectrum.Limits.GroupBy(l => l.Standard))
         {
-            sheet.Polygon(ExceededMark((bar.Left + bar.Right) / 2, bar.Top - 3), Look.Limit);
-        }
-    }
-
-    private static Spot[] ExceededMark(double x, double y) => [new(x, y), new(x - 3.5, y - 6.5), new(x + 3.5, y - 6.5)];
-
-    private static void DrawLimits(Sheet sheet, Panel panel, BusSpectrum spectrum)
-    {
-        foreach (SpectrumLimit limit in spectrum.Limits.Where(l => l.Percent <= panel.Up.To))
-        {
-            double y = panel.Y(limit.Percent);
-            sheet.Line(panel.X(limit.FirstSlot), y, panel.X(limit.LastSlot + 1), y, Look.LimitLine);
-        }
-    }
-
-    private static List<LegendEntry> LegendOf(BusSpectrum spectrum, bool beside, double largest)
-    {
-        var entries = new List<LegendEntry>();
-        if (beside)
-        {
-            entries.AddRange(spectrum.States.Select((s, i) => LegendEntry.Patch(
-                spectrum.Percent[i].All(p => p is null) ? $"{s}: bus dead or nothing injected" : s, Look.Bars[i])));
-        }
-        else
-        {
-            entries.Add(LegendEntry.Patch(FormattableString.Invariant($"worst of {spectrum.States.Count} states{(HasLetters(spectrum) ? ", its letter above" : "")}"), Look.Bars[0]));
-            entries.Add(LegendEntry.Line("lowest of them", new Stroke(Look.Bars[1], 2)));
-            entries.AddRange(spectrum.LetteredStates.Where(_ => HasLetters(spectrum)).Select(s => LegendEntry.Key(spectrum.States[s], spectrum.LetterOf(s))));
-        }
-
-        foreach (var limits in spectrum.Limits.GroupBy(l => l.Standard))
-        {
-            double[] percents = [.. limits.Select(l => l.Percent).Distinct().Order()];
-            string range = percents.Length == 1 ? Figures.LimitPercent(percents[0]) : $"{Figures.LimitPercent(percents[0])} to {Figures.LimitPercent(percents[^1])}";
-            string hidden = percents[0] > FarLimit * largest ? ", above this axis" : "";
-            entries.Add(LegendEntry.Line($"limit of one order, {limits.Key}: {range} %{hidden}", Look.LimitLine));
-        }
-
-        if (spectrum.Exceeded.Any(e => e.Contains(true)))
-        {
-            entries.Add(new LegendEntry("limit exceeded", (sheet, box) => sheet.Polygon(
-                ExceededMark((box.Left + box.Right) / 2, box.Bottom - 4), Look.Limit)));
+            string percent = string.Join(", ", standard.Select(l => Figures.LimitPercent(l.Percent)).Distinct());
+            string beyond = standard.All(l => l.Percent > top) ? ", beyond this axis" : "";
+            entries.Add(new KeyEntry($"limit of each order, {standard.Key}: {percent} %{beyond}", new SeriesLook(Look.Limit, LinePattern.Solid, MarkerShape.None)));
         }
 
         return entries;

@@ -1,6 +1,6 @@
 using System.Globalization;
 
-namespace HarmonicSweep.Reports.Drawing;
+namespace HarmonicSweep.Reports;
 
 /// <summary>Numbers as they stand on a picture.</summary>
 internal static class Figures
@@ -24,6 +24,11 @@ internal static class Figures
         int decimals = Math.Clamp(2 - (int)Math.Floor(Math.Log10(size)), 0, 5);
         return value.ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
     }
+
+    /// <summary>A round number at a tick: 0.02, 5, 200; very small and large ones with a power of ten.</summary>
+    public static string Tick(double value) => value is not 0 && Math.Abs(value) is < 1e-3 or >= 1e6
+        ? Short(value)
+        : value.ToString("0.####", CultureInfo.InvariantCulture);
 
     /// <summary>An order: whole as it is, else two decimals.</summary>
     public static string Order(double order) => order.ToString("0.##", CultureInfo.InvariantCulture);
