@@ -23,6 +23,7 @@ public sealed class TwinDistortionTests
     [MemberData(nameof(Batches))]
     public void Distortion_of_random_plants_agrees_with_the_twin(int batch)
     {
+        int compared = 0;
         for (int seed = 20 * batch; seed < 20 * (batch + 1); seed++)
         {
             RandomPlant grown = RandomPlant.Grow(seed);
@@ -30,10 +31,14 @@ public sealed class TwinDistortionTests
             {
                 if (TwinPowerFlow.Solve(new PlantInState(grown.Plant, state)).IsPlain)
                 {
+                    compared++;
                     string label = string.Create(CultureInfo.InvariantCulture, $"seed {seed}, state {state.Name}");
                     DistortionComparison.Check(grown.Plant, state, ProductSide.Distortion(grown.Plant, state), label, Relative, Roundings);
                 }
             }
         }
+
+        // of 60 plant-states; the others have no plain solution at the fundamental
+        Assert.InRange(compared, 50, 60);
     }
 }

@@ -62,6 +62,9 @@ internal sealed class TwinPowerFlow
     /// <summary>False when Newton's method did not settle.</summary>
     public bool Converged { get; private set; }
 
+    /// <summary>Whether some island lives on its generators alone, the largest holding its bus.</summary>
+    public bool HoldsByGenerator => _holds.Count > 0;
+
     /// <summary>
     /// Converged with every live voltage between 70 and 115 % of nominal. Outside, near collapse or a resonance at the
     /// fundamental, several solutions lie close together and two programs may rightly settle on different ones.
