@@ -26,7 +26,7 @@ internal sealed partial record Workshop
     {
         IReadOnlyList<Picture> pictures = PictureBook.Plan(caseFile.Plant.Title, result, caseFile.Settings);
         PictureBook.Write(pictures, folder, threads, cancellation);
-        IReadOnlyList<string> missing = PictureBook.MissingCharacters(pictures);
+        IReadOnlyList<string> missing = PictureBook.MissingCharacters(caseFile.Plant.Title, result);
         return missing.Count == 0 ? [] :
         [
             new Finding(
