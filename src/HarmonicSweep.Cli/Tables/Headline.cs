@@ -1,3 +1,4 @@
+using HarmonicSweep.Cases.Results;
 using HarmonicSweep.Studies;
 
 namespace HarmonicSweep.Cli;
@@ -89,7 +90,7 @@ internal static class Headline
             string not = dead > 0 ? $"; {Format.Count(dead, "value")} not judged (dead bus)" : "";
             Line(
                 writer, "Distortion",
-                $"highest THD {Format.Percent(worst)} % of V_1 at {thd[0].Row.Bus}, state {thd[0].State} ({Cases.Results.ResultWords.Word(view.Rule)} sum){not}");
+                $"highest THD {Format.Percent(worst)} % of V_1 at {thd[0].Row.Bus}, state {thd[0].State} ({view.Rule.Word()} sum){not}");
         }
     }
 

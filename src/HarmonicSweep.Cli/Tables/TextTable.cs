@@ -68,8 +68,8 @@ internal static class TextTable
         }
     }
 
-    /// <summary>A blank line, then the title in capitals.</summary>
-    public static void Title(TextWriter writer, string title)
+    /// <summary>A blank line, then the title.</summary>
+    private static void Title(TextWriter writer, string title)
     {
         writer.WriteLine();
         writer.WriteLine(title);

@@ -20,6 +20,15 @@ public class FormatTests
     public void Number_keeps_four_significant_digits(double? value, string expected) => Assert.Equal(expected, Format.Number(value));
 
     [Theory]
+    [InlineData(null, "-")]
+    [InlineData(0.0, "0")]
+    [InlineData(0.01234567, "0.0123")]
+    [InlineData(0.00001, "0.0000")]
+    [InlineData(7.18912, "7.189")]
+    [InlineData(101.947, "101.9")]
+    public void Percent_stops_at_four_decimals(double? value, string expected) => Assert.Equal(expected, Format.Percent(value));
+
+    [Theory]
     [InlineData(5.0, "5")]
     [InlineData(11.3, "11.3")]
     [InlineData(null, "-")]
