@@ -16,7 +16,7 @@ internal delegate IReadOnlyList<Finding> DrawPlots(
 internal sealed partial record Workshop
 {
     /// <summary>Reads a case folder: the case, or null, and its findings.</summary>
-    public required Func<string, (CaseFile? Case, IReadOnlyList<Finding> Findings)> ReadCase { get; init; }
+    public required Func<string, CaseReadResult> ReadCase { get; init; }
 
     /// <summary>Writes the tables of a new case; the finding says why it was refused.</summary>
     public required Func<string, Finding?> NewCase { get; init; }

@@ -11,7 +11,7 @@ internal sealed partial record Workshop
     /// <summary>The readers, studies and plots of the program.</summary>
     public static Workshop Real { get; } = new()
     {
-        ReadCase = static folder => Read(folder),
+        ReadCase = static folder => CaseReader.Read(folder),
         NewCase = static folder => CaseTemplate.Write(folder),
         DrawPlots = Draw,
         Check = static (request, progress, cancellation) => CheckStudy.Run(request, progress, cancellation),
@@ -21,18 +21,12 @@ internal sealed partial record Workshop
         Main = static (request, progress, cancellation) => MainStudy.Run(request, progress, cancellation),
     };
 
-    private static (CaseFile? Case, IReadOnlyList<Finding> Findings) Read(string folder)
-    {
-        CaseReadResult read = CaseReader.Read(folder);
-        return (read.Case, read.Findings);
-    }
-
     private static IReadOnlyList<Finding> Draw(
         CaseFile caseFile, StudyResult result, string folder, int threads, CancellationToken cancellation)
     {
         IReadOnlyList<Picture> pictures = PictureBook.Plan(caseFile.Plant.Title, result, caseFile.Settings);
         PictureBook.Write(pictures, folder, threads, cancellation);
-        IReadOnlyList<string> missing = PictureBook.MissingCharacters(pictures);
+        IReadOnlyList<string> missing = PictureBook.MissingCharacters(caseFile.Plant.Title, result);
         return missing.Count == 0 ? [] :
         [
             new Finding(

@@ -81,7 +81,9 @@ internal sealed class CsvFile
         {
             if (record.Cells.Length < columns || record.Cells.Skip(columns).Any(c => c.Length > 0))
             {
-                string hint = DecimalCommas ? "" : ", and write decimals with a point";
+                string hint = record.Cells.Length > columns && !DecimalCommas
+                    ? "; write decimals with a point, and a text with a comma in it in double quotes"
+                    : "";
                 findings.Error(
                     Ids.CellCount, new SourceLocation(File, record.Line),
                     Invariant($"the row has {record.Cells.Length} cells; expected {columns}, as in the header."),

@@ -79,6 +79,7 @@ internal sealed class CaseRun(CaseCommand command, CommandOptions options, Parse
         {
             using var stream = new TextWriterStream(terminal.Out);
             ResultJson.WriteRefusal(stream, _folder, Diagnostics.Sorted(findings), HsweepCommand.Version);
+            terminal.Out.Write('\n');
         }
 
         return exitCode;

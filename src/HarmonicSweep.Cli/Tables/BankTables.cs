@@ -42,13 +42,26 @@ internal static class BankTables
             return;
         }
 
+        Worst(writer, screen);
+    }
+
+    /// <summary>One row a bus: its largest THD and its largest harmonic, each with the position that gives it.</summary>
+    private static void Worst(TextWriter writer, ScreenResult screen)
+    {
+        (string Bus, WorstValue? Thd, WorstValue? Harmonic)[] buses =
+        [
+            .. screen.Worst.GroupBy(w => w.Bus, StringComparer.Ordinal)
+                .Select(g => (g.Key, g.FirstOrDefault(w => w.Order is null), g.Where(w => w.Order is not null).MaxBy(w => w.Percent)))
+                .OrderByDescending(b => b.Item2?.Percent ?? 0),
+        ];
         TextTable.Write(
-            writer, "Largest voltages over all positions", [.. screen.Worst.OrderBy(w => w.Order is not null).ThenByDescending(w => w.Percent)], view.RowLimit,
-            new("bus", w => w.Bus, Left: true),
-            new("quantity", w => w.Order is null ? "THD_V" : "V_h", Left: true),
-            new("order", w => Format.GivenOrder(w.Order)),
-            new("value [%]", w => Format.Percent(w.Percent)),
-            new("at position", w => w.State, Left: true));
+            writer, "Largest distortion of every bus over all positions", buses, int.MaxValue,
+            new("bus", b => b.Bus, Left: true),
+            new("THD [% V_1]", b => Format.Percent(b.Thd?.Percent)),
+            new("at position", b => b.Thd?.State ?? Format.Missing, Left: true),
+            new("order", b => Format.GivenOrder(b.Harmonic?.Order)),
+            new("V_h [% nominal]", b => Format.Percent(b.Harmonic?.Percent)),
+            new("at position", b => b.Harmonic?.State ?? Format.Missing, Left: true));
     }
 
     /// <summary>What the position does for the plant at the fundamental: the reason to switch it at all.</summary>

@@ -31,10 +31,10 @@ internal static class Format
         return number.ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
     }
 
-    /// <summary>Two decimals, as percent values are read.</summary>
-    public static string Percent(double? value) => value is { } number && double.IsFinite(number)
-        ? number.ToString("F2", CultureInfo.InvariantCulture)
-        : Missing;
+    /// <summary>Four significant digits, but never more than four decimals: less of a percent matters to nobody.</summary>
+    public static string Percent(double? value) => value is { } number and not 0 && Math.Abs(number) < 1
+        ? number.ToString("F4", CultureInfo.InvariantCulture)
+        : Number(value);
 
     /// <summary>An order that was given or injected: exactly as it is, shortest form.</summary>
     public static string GivenOrder(double? order) => order?.ToString("R", CultureInfo.InvariantCulture) ?? Missing;

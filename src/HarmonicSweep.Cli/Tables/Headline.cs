@@ -9,8 +9,9 @@ internal static class Headline
     public static void Write(TextWriter writer, ReportView view)
     {
         string[] states = [.. view.Result.States.Select(s => s.State)];
+        writer.WriteLine(view.Plant.Title);
         writer.WriteLine(
-            $"{view.Plant.Title}: {Format.GivenOrder(view.Plant.FrequencyHz)} Hz, {Format.Count(view.Plant.Buses.Count)} buses, "
+            $"  {Format.GivenOrder(view.Plant.FrequencyHz)} Hz, {Format.Count(view.Plant.Buses.Count)} buses, "
             + $"{Format.Count(view.Plant.Elements.Count, "element")}; {(states.Length == 1 ? "state" : Format.Count(states.Length) + " states:")} {Format.Some(states, 6)}");
         Limits(writer, view);
         Banks(writer, view);
@@ -29,10 +30,12 @@ internal static class Headline
             return;
         }
 
+        string[] buses = [.. limits.Select(l => l.Row.Bus).OfType<string>().Distinct(StringComparer.Ordinal)];
         int Count(Verdict verdict) => limits.Count(l => l.Row.Verdict == verdict);
         Line(
             writer, "Limits",
-            $"{Format.Count(Count(Verdict.Exceeded))} exceeded, {Format.Count(Count(Verdict.Within))} within, {Format.Count(Count(Verdict.NotJudged))} not judged");
+            $"{Format.Count(Count(Verdict.Exceeded))} exceeded, {Format.Count(Count(Verdict.Within))} within, {Format.Count(Count(Verdict.NotJudged))} not judged"
+            + (buses.Length > 0 ? $"; they hold at {Format.Some(buses, 3)} only" : ""));
         InState<LimitVerdict> first = limits[0];
         if (ReportView.UsePercent(first.Row) is { } use)
         {
@@ -67,10 +70,13 @@ internal static class Headline
             Line(writer, "", $"and {Format.Count(bad.Count - 4)} more");
         }
 
-        int overloaded = screen.Positions.Count(p => p.Loading is { Overloaded: true });
-        if (overloaded > 0)
+        IReadOnlyList<BankPosition> overloaded = view.Overloaded();
+        if (overloaded.Count > 0)
         {
-            Line(writer, "", $"{Format.Count(overloaded, "position")} beyond what the capacitors themselves may carry");
+            Line(
+                writer, "",
+                $"{Format.Count(overloaded.Count, "position")} beyond what the capacitors may carry, worst {overloaded[0].State}: "
+                + $"{Format.Number(overloaded[0].Loading!.CurrentPercent)} % of rated current");
         }
     }
 
@@ -107,9 +113,10 @@ internal static class Headline
         }
 
         parts.Add($"{Format.Count(view.Case.Assumed.Count, "value")} assumed");
-        if (view.Result.States.Count > 0)
+        double backwardError = view.Result.States.Select(s => s.WorstBackwardError).DefaultIfEmpty().Max();
+        if (backwardError > 0)
         {
-            parts.Add($"worst backward error {Format.Number(view.Result.States.Max(s => s.WorstBackwardError), 2)}");
+            parts.Add($"worst backward error {Format.Number(backwardError, 2)}");
         }
 
         Line(writer, "Trust", string.Join(", ", parts));

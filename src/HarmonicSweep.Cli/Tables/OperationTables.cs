@@ -28,10 +28,11 @@ internal static class OperationTables
                 new TextColumn<Bus>("nominal [kV]", b => Format.Number(b.NominalKv)),
                 .. view.Result.States.Select(s => new TextColumn<Bus>(s.State, b => Percent(s.State, b))),
             ]);
-        foreach (StateResult state in view.Result.States.Where(s => s.InjectedOrders.Count > 0))
+        foreach (IGrouping<string, StateResult> same in view.Result.States.GroupBy(
+            s => Format.Some([.. s.InjectedOrders.Select(Format.GivenOrderOf)], 20), StringComparer.Ordinal))
         {
-            writer.WriteLine(
-                $"  injected orders, state {state.State}: {Format.Some([.. state.InjectedOrders.Select(Format.GivenOrderOf)], 20)}");
+            string[] states = [.. same.Select(s => s.State)];
+            writer.WriteLine($"  injected orders: {(same.Key.Length == 0 ? "none" : same.Key)} ({Format.Some(states, 6)})");
         }
     }
 }

@@ -47,11 +47,14 @@ internal sealed record ReportView(CaseFile Case, StudyRequest Request, StudyResu
         .. All(s => s.Distortion.Where(d => d.Rule == Rule)).OrderByDescending(d => d.Row.PercentOfFundamental ?? -1),
     ];
 
-    /// <summary>Positions that must not be dwelt on or overload the capacitors, the nearest to an injected order first.</summary>
-    public IReadOnlyList<BankPosition> BadPositions() =>
+    /// <summary>Positions that overload the capacitors, the largest current first.</summary>
+    public IReadOnlyList<BankPosition> Overloaded() =>
     [
-        .. DoNotDwell(), .. (Result.Screen?.Positions ?? []).Where(p => !p.DoNotDwell && p.Loading is { Overloaded: true }),
+        .. (Result.Screen?.Positions ?? []).Where(p => p.Loading is { Overloaded: true }).OrderByDescending(p => p.Loading!.CurrentPercent),
     ];
+
+    /// <summary>Positions to avoid: those that overload the capacitors, then those not to dwell on.</summary>
+    public IReadOnlyList<BankPosition> BadPositions() => [.. Overloaded().Union(DoNotDwell())];
 
     /// <summary>Positions that must not be dwelt on, the nearest to an injected order first.</summary>
     public IReadOnlyList<BankPosition> DoNotDwell() =>

@@ -28,7 +28,7 @@ internal static class TextTable
         WriteLines(writer, cells, [.. columns.Select(c => c.Left)]);
         if (rows.Count > shown.Length)
         {
-            writer.WriteLine($"... {Format.Count(rows.Count - shown.Length, "more row")}: --format csv or --out lists them all.");
+            writer.WriteLine($"... {Format.Count(rows.Count - shown.Length, "more row")} in the CSV tables (--out, --format csv).");
         }
     }
 

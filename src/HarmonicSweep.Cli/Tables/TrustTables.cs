@@ -26,23 +26,25 @@ internal static class TrustTables
         }
     }
 
+    /// <summary>One row a check, in the state where it differs most; elsewhere than in check only those that differ too much.</summary>
     private static void HandChecks(TextWriter writer, ReportView view)
     {
-        IReadOnlyList<InState<HandCheck>> all = view.All(s => s.HandChecks);
+        bool all = view.Command == "check";
         InState<HandCheck>[] shown =
         [
-            .. all.Where(c => !view.IsStudy || !c.Row.Agrees).OrderBy(c => c.Row.Agrees).ThenByDescending(c => c.Row.RelativeDifference),
+            .. view.All(s => s.HandChecks).GroupBy(c => (c.Row.Name, c.Row.Subject)).Select(g => g.MaxBy(c => c.Row.RelativeDifference))
+                .Where(c => all || !c.Row.Agrees).OrderBy(c => c.Row.Agrees).ThenByDescending(c => c.Row.RelativeDifference),
         ];
         TextTable.Write(
-            writer, view.IsStudy ? "Hand checks that differ" : "Hand checks, largest difference first", shown, view.RowLimit,
-            new("state", c => c.State, Left: true),
+            writer, all ? "Hand checks, each in the state where it differs most" : "Hand checks that differ", shown, view.RowLimit,
             new("check", c => c.Row.Name, Left: true),
             new("of", c => c.Row.Subject, Left: true),
             new("by hand", c => Format.Number(c.Row.Hand, 5)),
             new("computed", c => Format.Number(c.Row.Computed, 5)),
             new("unit", c => c.Row.Unit, Left: true),
-            new("apart [%]", c => Format.Number(c.Row.RelativeDifference * 100, 2)),
+            new("apart [%]", c => Format.Percent(c.Row.RelativeDifference * 100)),
             new("", c => c.Row.Agrees ? "agrees" : "DIFFERS", Left: true),
+            new("state", c => c.State, Left: true),
             new("formula", c => c.Row.Formula, Left: true));
     }
 

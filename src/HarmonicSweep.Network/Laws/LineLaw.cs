@@ -38,35 +38,32 @@ public sealed class LineLaw : BranchLaw
         var y = new Complex(0, order * _susceptancePerKm);
         // sinh(x)/x and tanh(x/2)/(x/2) are even in x: the branch of the square root does not matter
         Complex x = Complex.Sqrt(z * y) * _lengthKm;
-        Complex series = _circuits / (z * _lengthKm * SinhOver(x));
-        Complex halfShunt = _circuits * y * (_lengthKm / 2) * TanhOver(x / 2);
+        (Complex sinh, Complex tanh) = Ratios(x);
+        Complex series = _circuits / (z * _lengthKm * sinh);
+        Complex halfShunt = _circuits * (_lengthKm / 2) * y * tanh;
         return new TwoPort(series + halfShunt, -series, -series, series + halfShunt);
     }
 
     /// <inheritdoc/>
     public override double InductiveQuality(double order) => _perKm.Quality(order);
 
-    /// <summary>sinh(x)/x; by its series where x is small, since the quotient would lose digits.</summary>
-    private static Complex SinhOver(Complex x)
+    /// <summary>
+    /// sinh(x)/x and tanh(x/2)/(x/2), from one exponential; by their series where x is small, since the quotients would lose
+    /// digits there.
+    /// </summary>
+    private static (Complex SinhOverX, Complex TanhOverHalfX) Ratios(Complex x)
     {
-        if (Complex.Abs(x) < 0.02)
+        Complex x2 = x * x;
+        if (x2.Real * x2.Real + x2.Imaginary * x2.Imaginary < 1e-6)
         {
-            Complex x2 = x * x;
-            return 1 + x2 / 6 * (1 + x2 / 20 * (1 + x2 / 42));
+            // the terms left out are below 1e-15 for |x| < 0.032
+            Complex half2 = x2 / 4;
+            return (
+                1 + x2 / 6 * (1 + x2 / 20 * (1 + x2 / 42)),
+                1 - half2 / 3 * (1 - half2 * (2.0 / 5) * (1 - half2 * (17.0 / 42))));
         }
 
-        return Complex.Sinh(x) / x;
-    }
-
-    /// <summary>tanh(x)/x; by its series where x is small.</summary>
-    private static Complex TanhOver(Complex x)
-    {
-        if (Complex.Abs(x) < 0.02)
-        {
-            Complex x2 = x * x;
-            return 1 - x2 / 3 * (1 - x2 * 2 / 5 * (1 - x2 * 17 / 42));
-        }
-
-        return Complex.Tanh(x) / x;
+        Complex exponential = Complex.Exp(x);
+        return ((exponential - 1 / exponential) / (2 * x), (exponential - 1) * 2 / ((exponential + 1) * x));
     }
 }

@@ -10,24 +10,24 @@ namespace HarmonicSweep.Network;
 public sealed class TransformerLaw : BranchLaw
 {
     private readonly SeriesImpedance _impedance;
-    private readonly double _ratio;
-    private readonly Complex _shift;
+    private readonly double _inverseRatio;
+    private readonly Complex _shiftOverRatio;
 
     /// <summary>Creates the law of a transformer at a tap, percent.</summary>
     public TransformerLaw(Transformer transformer, double tapPercent, Sequence sequence)
     {
         _impedance = new SeriesImpedance(transformer.ResistanceOhm, transformer.ReactanceOhm, transformer.Law);
-        _ratio = transformer.HvKv / transformer.LvKv * (1 + tapPercent / 100);
+        _inverseRatio = 1 / (transformer.HvKv / transformer.LvKv * (1 + tapPercent / 100));
         double degrees = 30 * transformer.Group.Clock * (sequence == Sequence.Negative ? -1 : 1);
-        _shift = Angle.Phasor(degrees);
+        _shiftOverRatio = Angle.Phasor(degrees) * _inverseRatio;
     }
 
     /// <inheritdoc/>
     public override TwoPort Admittance(double order)
     {
         Complex y = 1 / _impedance.At(order);
-        Complex mutual = -y / _ratio;
-        return new TwoPort(y / (_ratio * _ratio), mutual * _shift, mutual * Complex.Conjugate(_shift), y);
+        return new TwoPort(
+            y * (_inverseRatio * _inverseRatio), -y * _shiftOverRatio, -y * Complex.Conjugate(_shiftOverRatio), y);
     }
 
     /// <inheritdoc/>

@@ -3,30 +3,38 @@ namespace HarmonicSweep.Reports.Drawing;
 /// <summary>A curve on a sheet: runs of spots between gaps, thinned to what the eye can tell apart.</summary>
 internal static class Curve
 {
-    /// <summary>Width in which at most four spots are kept, sheet units; 540 units give at most 1440 spots.</summary>
+    /// <summary>Width in which at most four spots are kept, sheet units; 540 units give at most 1440 spots, before straightening.</summary>
     private const double Slice = 1.5;
+
+    /// <summary>A spot closer than this to the line between its neighbours is not drawn: 0.0015 cm on paper.</summary>
+    private const double Tolerance = 0.06;
 
     /// <summary>The runs of a curve between its gaps (null values).</summary>
     /// <param name="panel">Where it is drawn.</param>
-    /// <param name="points">Across and up values, ascending across; null up = gap.</param>
+    /// <param name="across">Values of the horizontal axis, ascending.</param>
+    /// <param name="up">Values of the vertical axis; null = gap.</param>
     /// <param name="largestStep">A larger step upwards between neighbours breaks the curve (a wrapped angle).</param>
-    public static List<Spot[]> Runs(Panel panel, IEnumerable<(double Across, double? Up)> points, double largestStep = double.PositiveInfinity)
+    public static List<Spot[]> Runs(
+        Panel panel, IReadOnlyList<double> across, IReadOnlyList<double?> up, double largestStep = double.PositiveInfinity)
     {
         var runs = new List<Spot[]>();
         var run = new List<Spot>();
         double last = double.NaN;
-        foreach ((double across, double? up) in points)
+        for (int i = 0; i < across.Count; i++)
         {
-            if (up is not { } value || Math.Abs(value - last) > largestStep)
+            if (up[i] is not { } value)
+            {
+                End();
+                continue;
+            }
+
+            if (Math.Abs(value - last) > largestStep)
             {
                 End();
             }
 
-            if (up is { } kept)
-            {
-                run.Add(new Spot(panel.X(across), panel.Y(kept)));
-                last = kept;
-            }
+            run.Add(new Spot(panel.X(across[i]), panel.Y(value)));
+            last = value;
         }
 
         End();
@@ -45,7 +53,7 @@ internal static class Curve
     }
 
     /// <summary>Draws the runs; a run of one spot becomes a mark.</summary>
-    public static void Draw(Sheet sheet, IEnumerable<Spot[]> runs, SeriesLook look, double width = Look.CurveWidth)
+    public static void Draw(Sheet sheet, List<Spot[]> runs, SeriesLook look)
     {
         foreach (Spot[] run in runs)
         {
@@ -55,12 +63,12 @@ internal static class Curve
             }
             else
             {
-                sheet.Polyline(run, look.Stroke(width));
+                sheet.Polyline(run, look.Stroke(Look.CurveWidth));
             }
         }
     }
 
-    /// <summary>First, lowest, highest and last spot of every slice, so that no peak is lost.</summary>
+    /// <summary>First, lowest, highest and last spot of every slice, so that no peak is lost, less those on straight lines.</summary>
     public static Spot[] Thin(IReadOnlyList<Spot> run)
     {
         var kept = new List<Spot>();
@@ -74,14 +82,55 @@ internal static class Curve
                 high = run[end].Y > run[high].Y ? end : high;
             }
 
-            foreach (int index in new SortedSet<int> { start, low, high, end - 1 })
+            int last = -1;
+            foreach (int index in (ReadOnlySpan<int>)[start, Math.Min(low, high), Math.Max(low, high), end - 1])
             {
-                kept.Add(run[index]);
+                if (index > last)
+                {
+                    kept.Add(run[index]);
+                    last = index;
+                }
             }
 
             start = end;
         }
 
-        return [.. kept];
+        return Straightened(kept);
+    }
+
+    /// <summary>Leaves out spots that lie on the line between spots kept (Douglas and Peucker 1973): most of a smooth curve.</summary>
+    private static Spot[] Straightened(List<Spot> run)
+    {
+        var kept = new List<Spot> { run[0] };
+        if (run.Count > 1)
+        {
+            KeepBetween(0, run.Count - 1);
+        }
+
+        return kept.ToArray();
+
+        void KeepBetween(int first, int last)
+        {
+            Spot a = run[first], b = run[last];
+            double length = Math.Max(Math.Sqrt((b.X - a.X) * (b.X - a.X) + (b.Y - a.Y) * (b.Y - a.Y)), 1e-9), furthest = Tolerance;
+            int at = -1;
+            for (int i = first + 1; i < last; i++)
+            {
+                double distance = Math.Abs((run[i].X - a.X) * (b.Y - a.Y) - (run[i].Y - a.Y) * (b.X - a.X)) / length;
+                if (distance > furthest)
+                {
+                    (furthest, at) = (distance, i);
+                }
+            }
+
+            if (at < 0)
+            {
+                kept.Add(b);
+                return;
+            }
+
+            KeepBetween(first, at);
+            KeepBetween(at, last);
+        }
     }
 }

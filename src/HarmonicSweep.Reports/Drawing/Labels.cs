@@ -5,8 +5,13 @@ internal sealed class Labels(Box area)
 {
     private readonly List<Box> _taken = [];
 
-    /// <summary>Reserves room that no label may cover.</summary>
-    public void Reserve(Box box) => _taken.Add(box);
+    /// <summary>Draws a mark that no label may cover.</summary>
+    public void ReserveMark(Sheet sheet, SeriesLook look, Spot spot)
+    {
+        const double room = 4;
+        sheet.Mark(look.Mark, spot.X, spot.Y, 3.2, look.Colour);
+        _taken.Add(new Box(spot.X - room, spot.Y - room, spot.X + room, spot.Y + room));
+    }
 
     /// <summary>Writes a label of one or two lines near a spot, where it first fits: above, beside, higher.</summary>
     /// <returns>Whether it was written.</returns>

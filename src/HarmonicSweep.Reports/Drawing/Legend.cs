@@ -6,6 +6,9 @@ namespace HarmonicSweep.Reports.Drawing;
 /// <param name="Details">Further words; as many as have room are shown.</param>
 internal sealed record LegendEntry(string Name, Action<Sheet, Box>? Sample, params string[] Details)
 {
+    /// <summary>Width the sample needs; all samples of a legend get the widest.</summary>
+    public double SampleWidth { get; init; } = 38;
+
     /// <summary>A line with the mark of its series.</summary>
     public static LegendEntry Line(string name, SeriesLook look, params string[] details) => new(name, (sheet, box) =>
     {
@@ -21,24 +24,31 @@ internal sealed record LegendEntry(string Name, Action<Sheet, Box>? Sample, para
     /// <summary>A filled patch.</summary>
     public static LegendEntry Patch(string name, Colour colour) => new(name, (sheet, box) =>
     {
-        var patch = new Box(box.Right - 14, box.Top + 3, box.Right, box.Bottom - 2);
+        double middle = (box.Left + box.Right) / 2;
+        var patch = new Box(middle - 7, box.Top + 3, middle + 7, box.Bottom - 2);
         sheet.Fill(patch, colour);
         sheet.Outline(patch, Look.Frame with { Width = 0.6 });
-    });
+    })
+    {
+        SampleWidth = 14,
+    };
 
     /// <summary>A letter.</summary>
     public static LegendEntry Key(string name, string key) => new(name, (sheet, box) =>
-        sheet.Write(key, box.Right, box.Bottom - 3.5, Look.Text with { Bold = true, Anchor = Anchor.End }));
+        sheet.Write(key, (box.Left + box.Right) / 2, box.Bottom - 4, Look.Text with { Bold = true, Anchor = Anchor.Middle }))
+    {
+        SampleWidth = 14,
+    };
 }
 
 /// <summary>A legend below the panels: in columns, or one row an entry when there are details.</summary>
 internal static class Legend
 {
     private const double RowHeight = 16;
-    private const double SampleWidth = 38;
     private const double Gap = 7;
     private const double ColumnGap = 18;
-    private const double WidestName = 250;
+    private const double DetailGap = 14;
+    private const double WidestBesideDetails = 250;
 
     /// <summary>Height the entries need.</summary>
     public static double Height(IReadOnlyList<LegendEntry> entries, double width) =>
@@ -47,18 +57,21 @@ internal static class Legend
     /// <summary>Draws the entries below y.</summary>
     public static void Draw(Sheet sheet, IReadOnlyList<LegendEntry> entries, double left, double top, double width)
     {
+        if (entries.Count == 0)
+        {
+            return;
+        }
+
         int rows = Rows(entries, width);
-        double columnWidth = ColumnWidth(entries, width);
-        bool details = entries.Any(e => e.Details.Length > 0);
-        double names = entries.Count == 0 ? 0 : entries.Max(e => Math.Min(WidestName, Roboto.Width(e.Name, Look.Text)));
+        double columnWidth = ColumnWidth(entries, width), sample = entries.Max(e => e.SampleWidth);
+        double names = WidestNameDrawn(entries, width - sample - Gap);
         for (int i = 0; i < entries.Count; i++)
         {
             double x = left + i / rows * columnWidth, y = top + i % rows * RowHeight;
-            entries[i].Sample?.Invoke(sheet, new Box(x, y, x + SampleWidth, y + RowHeight));
-            double text = x + SampleWidth + Gap, baseline = y + RowHeight - 4;
-            double room = details && entries[i].Details.Length > 0 ? names : Math.Min(columnWidth, left + width - x) - SampleWidth - Gap - 2;
-            sheet.Write(Roboto.Fit(entries[i].Name, Look.Text, Math.Max(room, 30)), text, baseline, Look.Text);
-            WriteDetails(sheet, entries[i].Details, text + names + 12, left + width, baseline);
+            double text = x + sample + Gap, baseline = y + RowHeight - 4;
+            entries[i].Sample?.Invoke(sheet, new Box(x, y, x + sample, y + RowHeight));
+            sheet.Write(Roboto.Fit(entries[i].Name, Look.Text, names), text, baseline, Look.Text);
+            WriteDetails(sheet, entries[i].Details, text + names + DetailGap, left + width, baseline);
         }
     }
 
@@ -73,18 +86,29 @@ internal static class Legend
             }
 
             sheet.Write(detail, x, baseline, Look.Note);
-            x += width + 14;
+            x += width + DetailGap;
         }
     }
 
-    private static double ColumnWidth(IReadOnlyList<LegendEntry> entries, double width) =>
-        entries.Count == 0 || entries.Any(e => e.Details.Length > 0)
+    /// <summary>Width kept for names: as wide as the widest, unless the details need the room.</summary>
+    private static double WidestNameDrawn(IReadOnlyList<LegendEntry> entries, double room)
+    {
+        double widest = entries.Max(e => Roboto.Width(e.Name, Look.Text)) + 0.5;
+        double details = entries.Max(e => e.Details.Sum(d => Roboto.Width(d, Look.Note) + DetailGap));
+        return Math.Min(Math.Min(widest, room), Math.Max(WidestBesideDetails, room - details));
+    }
+
+    private static double ColumnWidth(IReadOnlyList<LegendEntry> entries, double width)
+    {
+        double sample = entries.Max(e => e.SampleWidth);
+        return entries.Any(e => e.Details.Length > 0)
             ? width
-            : Math.Min(width, SampleWidth + Gap + ColumnGap + entries.Max(e => Math.Min(WidestName, Roboto.Width(e.Name, Look.Text) + 1)));
+            : Math.Min(width, sample + Gap + ColumnGap + WidestNameDrawn(entries, width - sample - Gap));
+    }
 
     private static int Rows(IReadOnlyList<LegendEntry> entries, double width)
     {
         int columns = Math.Max(1, (int)((width + ColumnGap) / ColumnWidth(entries, width)));
-        return Math.Max(1, (entries.Count + columns - 1) / columns);
+        return (entries.Count + columns - 1) / columns;
     }
 }

@@ -63,9 +63,11 @@ internal static class Look
     public static readonly Stroke MajorGrid = new(Colour.Of(0xD3D8DD), 0.8);
     public static readonly Stroke MinorGrid = new(Colour.Of(0xECEFF1), 0.8);
     public static readonly Stroke InjectedOrder = new(Colour.Of(0x8A6D3B), 0.8, 1.5f, 2);
+    public static readonly Stroke InjectedOrderOnShade = new(Ink, 1, 1.5f, 2);
     public static readonly Stroke LimitLine = new(Limit, 1.6, 6, 3);
 
     public static readonly TextStyle Title = new(TitleSize, Ink, Bold: true);
+    public static readonly TextStyle LongTitle = Title with { Size = 12 };
     public static readonly TextStyle Subtitle = new(TextSize, Faded);
     public static readonly TextStyle AxisTitle = new(AxisSize, Ink, Anchor: Anchor.Middle);
     public static readonly TextStyle AxisTitleTurned = AxisTitle with { Turned = true };
@@ -75,25 +77,25 @@ internal static class Look
     public static readonly TextStyle InjectedLabel = new(SmallSize, Colour.Of(0x6B5227), Anchor: Anchor.Middle);
 
     /// <summary>
-    /// Hues that stay apart for the common kinds of colour blindness (no red beside green of equal lightness), each with
-    /// a dash and a mark of its own so that a grey print can be read too.
+    /// Hues chosen so that any two stay at least 18 CIE 1976 units apart for normal, red-, green- and blue-blind eyes (a
+    /// test holds them to it), each with a dash and a mark of its own so that a grey print can be read too.
     /// </summary>
     public static readonly SeriesLook[] Series =
     [
         new(Colour.Of(0x0B4EA2), [], MarkShape.Circle),
-        new(Colour.Of(0xD9690F), [8, 3], MarkShape.Square),
-        new(Colour.Of(0x12806A), [8, 2.5f, 1.8f, 2.5f], MarkShape.Triangle),
-        new(Colour.Of(0x9C3C97), [2.2f, 2.2f], MarkShape.Diamond),
-        new(Colour.Of(0x3FA3DC), [14, 3.5f], MarkShape.TriangleDown),
-        new(Colour.Of(0x7A5A12), [4.5f, 2], MarkShape.Cross),
+        new(Colour.Of(0xDB7907), [8, 3], MarkShape.Square),
+        new(Colour.Of(0x007852), [8, 2.5f, 1.8f, 2.5f], MarkShape.Triangle),
+        new(Colour.Of(0xC56AB4), [2.2f, 2.2f], MarkShape.Diamond),
+        new(Colour.Of(0x4592F8), [14, 3.5f], MarkShape.TriangleDown),
+        new(Colour.Of(0x785400), [4.5f, 2], MarkShape.Cross),
         new(Colour.Of(0x2B2F33), [9, 2, 1.8f, 2, 1.8f, 2], MarkShape.Plus),
-        new(Colour.Of(0xE0588A), [5, 2, 1.5f, 2], MarkShape.Bar),
+        new(Colour.Of(0xFF4D82), [5, 2, 1.5f, 2], MarkShape.Bar),
     ];
 
     /// <summary>Fills of bars side by side: their lightness differs, and they stand in the order of the legend.</summary>
     public static readonly Colour[] Bars =
     [
-        Colour.Of(0x0B4EA2), Colour.Of(0xF3A64B), Colour.Of(0x12806A), Colour.Of(0xA9D8F2),
+        Colour.Of(0x0B4EA2), Colour.Of(0xF3A64B), Colour.Of(0x007852), Colour.Of(0xA9D8F2),
     ];
 
     private static readonly Colour[] HeatStops =

@@ -4,53 +4,84 @@ namespace HarmonicSweep.Reports.Drawing;
 internal static class OrderMarks
 {
     private const double RowHeight = 11;
+    private const double Gap = 3;
+    private const double TickLength = 4;
+
+    /// <summary>More orders than these are ticks above the frame alone, since as lines they would hide the curves.</summary>
+    private const int MostLines = 40;
+
+    private sealed record Number(string Label, double X, int Row);
 
     /// <summary>Room above the topmost panel.</summary>
-    public static double Room(IReadOnlyList<double> orders) => orders.Count == 0 ? 4 : 2 * RowHeight + 5;
-
-    /// <summary>The lines.</summary>
-    public static void DrawLines(Sheet sheet, Panel panel, IReadOnlyList<double> orders, bool halo = false)
+    public static double Room(Scale across, double width, IReadOnlyList<double> orders)
     {
-        foreach (double order in Within(panel, orders))
+        List<Number> numbers = Numbers(across, 0, width, orders);
+        return numbers.Count == 0 ? 4 : TickLength + 3 + RowHeight * (1 + numbers.Max(n => n.Row));
+    }
+
+    /// <summary>The lines; on a shaded panel with a white rim.</summary>
+    public static void DrawLines(Sheet sheet, Panel panel, IReadOnlyList<double> orders, bool shaded = false)
+    {
+        double[] within = [.. Within(panel.Across, orders)];
+        foreach (double x in within.Length > MostLines ? [] : within.Select(panel.X))
         {
-            double x = panel.X(order);
-            if (halo)
+            if (shaded)
             {
                 sheet.Line(x, panel.Area.Top, x, panel.Area.Bottom, new Stroke(Look.Paper, 1.8));
             }
 
-            sheet.Line(x, panel.Area.Top, x, panel.Area.Bottom, halo ? Look.InjectedOrder with { Width = 1, Colour = Look.Ink } : Look.InjectedOrder);
+            sheet.Line(x, panel.Area.Top, x, panel.Area.Bottom, shaded ? Look.InjectedOrderOnShade : Look.InjectedOrder);
         }
     }
 
-    /// <summary>The numbers above a panel; one without room in both rows is left out.</summary>
+    /// <summary>The numbers above a panel; one without room is left out.</summary>
     public static void DrawNumbers(Sheet sheet, Panel panel, IReadOnlyList<double> orders)
     {
-        if (orders.Count == 0)
+        List<Number> numbers = Numbers(panel.Across, panel.Area.Left, panel.Area.Width, orders);
+        Stroke tick = Look.InjectedOrder with { Dash = [] };
+        foreach (double x in Within(panel.Across, orders).Select(panel.X))
         {
-            return;
+            sheet.Line(x, panel.Area.Top - TickLength, x, panel.Area.Top, tick);
         }
 
-        Span<double> free = [double.NegativeInfinity, double.NegativeInfinity];
-        foreach (double order in Within(panel, orders))
+        foreach (Number number in numbers)
         {
-            string label = Figures.Order(order);
-            double x = panel.X(order), half = Roboto.Width(label, Look.InjectedLabel) / 2;
-            int row = x - half > free[0] ? 0 : 1;
-            if (row == 1 && x - half <= free[1])
-            {
-                continue;
-            }
-
-            sheet.Line(x, panel.Area.Top - 3 - row * RowHeight, x, panel.Area.Top, Look.InjectedOrder with { Dash = [] });
-            sheet.Write(label, x, panel.Area.Top - 5 - row * RowHeight, Look.InjectedLabel);
-            free[row] = x + half + 3;
-            free[0] = row == 1 ? Math.Max(free[0], x + 2) : free[0]; // its tick runs through the lower row
+            double lift = number.Row * RowHeight;
+            sheet.Line(number.X, panel.Area.Top - TickLength - lift, number.X, panel.Area.Top - TickLength, tick);
+            sheet.Write(number.Label, number.X, panel.Area.Top - TickLength - 3 - lift, Look.InjectedLabel);
         }
 
-        sheet.Write("injected", panel.Area.Left - 8, panel.Area.Top - 5, Look.InjectedLabel with { Anchor = Anchor.End });
+        if (numbers.Count > 0)
+        {
+            sheet.Write("injected", panel.Area.Left - 8, panel.Area.Top - TickLength - 3, Look.InjectedLabel with { Anchor = Anchor.End });
+        }
     }
 
-    private static IEnumerable<double> Within(Panel panel, IReadOnlyList<double> orders) =>
-        orders.Where(o => o >= panel.Across.From && o <= panel.Across.To);
+    private static List<Number> Numbers(Scale across, double left, double width, IReadOnlyList<double> orders)
+    {
+        var numbers = new List<Number>();
+        double[] within = [.. Within(across, orders)];
+        double lower = double.NegativeInfinity, upper = within.Length > MostLines ? double.PositiveInfinity : double.NegativeInfinity;
+        foreach (double order in within)
+        {
+            string label = Figures.Order(order);
+            double x = left + across.Fraction(order) * width, half = Roboto.Width(label, Look.InjectedLabel) / 2;
+            if (x - half > lower)
+            {
+                numbers.Add(new Number(label, x, 0));
+                lower = x + half + Gap;
+            }
+            else if (x - half > upper)
+            {
+                numbers.Add(new Number(label, x, 1));
+                upper = x + half + Gap;
+                lower = Math.Max(lower, x + 2); // its tick runs through the lower row
+            }
+        }
+
+        return numbers;
+    }
+
+    private static IEnumerable<double> Within(Scale across, IReadOnlyList<double> orders) =>
+        orders.Where(o => o >= across.From && o <= across.To);
 }

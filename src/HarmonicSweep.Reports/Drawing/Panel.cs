@@ -6,6 +6,8 @@ internal sealed class Panel(Box area, Scale across, Scale up)
     private const double TickLength = 4;
     private const double LabelGap = 4;
     private const double TitleRoom = 22;
+    private const double RightRoom = 14;
+    private const double LeastLeftRoom = 54; // for the word "injected" above a panel
 
     /// <summary>Room below a panel for tick labels and the title of the horizontal axis.</summary>
     public const double BottomRoom = 40;
@@ -25,7 +27,7 @@ internal sealed class Panel(Box area, Scale across, Scale up)
             widest = Math.Max(widest, scale.WidestLabel());
         }
 
-        return Math.Ceiling(6 + TitleRoom + widest + LabelGap + TickLength);
+        return Math.Max(LeastLeftRoom, Math.Ceiling(6 + TitleRoom + widest + LabelGap + TickLength));
     }
 
     public double X(double value) => Area.Left + Across.Fraction(value) * Area.Width;
@@ -78,6 +80,7 @@ internal sealed class Panel(Box area, Scale across, Scale up)
             }
 
             double half = Roboto.Width(tick.Label, Look.Text) / 2;
+            x = Math.Min(x, Area.Right + RightRoom - half);
             if (x - half > free)
             {
                 sheet.Write(tick.Label, x, Area.Bottom + TickLength + 12, Look.Text with { Anchor = Anchor.Middle });

@@ -3,7 +3,7 @@ using System.Globalization;
 namespace HarmonicSweep.Reports.Drawing;
 
 /// <summary>A tick of an axis; a tick without a label is a minor one.</summary>
-internal readonly record struct Tick(double Value, string? Label);
+internal sealed record Tick(double Value, string? Label);
 
 /// <summary>Maps values to a fraction of an axis and knows the ticks of it.</summary>
 internal abstract class Scale(double from, double to, IReadOnlyList<Tick> ticks)
@@ -78,7 +78,7 @@ internal sealed class LinearScale : Scale
         for (long i = (long)Math.Ceiling(from / minorStep - 1e-6); i * minorStep <= to + 1e-6 * minorStep; i++)
         {
             double value = i * minorStep;
-            yield return new Tick(value, i % perStep == 0 ? value.ToString(format, CultureInfo.InvariantCulture) : null);
+            yield return new Tick(value, i % perStep == 0 ? value.ToString(format, CultureInfo.InvariantCulture).Replace('-', '−') : null);
         }
     }
 }
@@ -100,14 +100,14 @@ internal sealed class LogScale : Scale
     }
 
     /// <summary>A scale that covers the positive values, with free room for labels at the top.</summary>
-    /// <param name="values">Values; those not above zero are passed over.</param>
+    /// <param name="values">Values by series; those not above zero are passed over.</param>
     /// <param name="headRoom">Fraction of the axis kept free above the largest value.</param>
-    public static LogScale Covering(IEnumerable<double> values, double headRoom = 0)
+    public static LogScale Covering(IEnumerable<IEnumerable<double?>> values, double headRoom = 0)
     {
         double smallest = double.PositiveInfinity, largest = 0;
-        foreach (double value in values)
+        foreach (double? entry in values.SelectMany(v => v))
         {
-            if (value > 0)
+            if (entry is { } value && value > 0)
             {
                 smallest = Math.Min(smallest, value);
                 largest = Math.Max(largest, value);

@@ -3,7 +3,7 @@ using HarmonicSweep.Studies;
 namespace HarmonicSweep.Reports.Pictures;
 
 /// <summary>A limit that holds for a run of neighbouring orders.</summary>
-internal readonly record struct SpectrumLimit(string Standard, double Percent, int FirstSlot, int LastSlot);
+internal sealed record SpectrumLimit(string Standard, double Percent, int FirstSlot, int LastSlot);
 
 /// <summary>The harmonic voltages of a bus in every state, under the chosen rule.</summary>
 internal sealed class BusSpectrum

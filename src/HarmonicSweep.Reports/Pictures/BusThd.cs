@@ -3,7 +3,7 @@ using HarmonicSweep.Studies;
 namespace HarmonicSweep.Reports.Pictures;
 
 /// <summary>A THD limit of a bus.</summary>
-internal readonly record struct ThdLimit(string Standard, double Percent);
+internal sealed record ThdLimit(string Standard, double Percent);
 
 /// <summary>THD of a bus in every state, percent of V_1 under the chosen rule; null = not judged.</summary>
 internal sealed record BusThd(string Bus, double?[] Percent, bool[] Exceeded, IReadOnlyList<ThdLimit> Limits)

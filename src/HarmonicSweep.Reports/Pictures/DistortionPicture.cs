@@ -14,9 +14,12 @@ internal static class DistortionPicture
     private const double TallestBars = 620;
     private const int MostRows = 34;
     private const double WidestName = 180;
+    private const double MostWords = 0.5;
 
     /// <summary>A limit further beyond the bars than this would flatten them: it is written instead of drawn.</summary>
     private const double FarLimit = 5;
+
+    private static readonly Stroke ThdLimitStroke = new(Look.Limit, 2.4);
 
     /// <summary>One picture, or several when there are more buses than a page has rows.</summary>
     public static IEnumerable<Picture> Plan(PictureContext context)
@@ -45,19 +48,19 @@ internal static class DistortionPicture
         double furthest = all.SelectMany(r => r.Limits).Select(l => l.Percent).Where(l => l <= FarLimit * largest).DefaultIfEmpty(0).Max();
         List<LegendEntry> legend = LegendOf(context, rows, beside, furthest);
         double height = legendTop + Legend.Height(legend, Picture.Width - 2 * Picture.Margin) + 6;
-        string subtitle = $"{context.CaseTitle} · orders 2 to 50, {context.RuleText} · {(beside ? "" : "worst of ")}{context.StatesText(states)}";
-        return new Picture("thd", "Voltage distortion (THD) by bus" + part, subtitle, height, sheet =>
+        string choices = $"orders 2 to 50, {context.RuleText} · {(beside ? "" : "worst of ")}{context.StatesText(states)}";
+        return new Picture("thd", "Voltage distortion (THD) by bus" + part, context.CaseTitle, choices, height, sheet =>
         {
             double left = Picture.Margin + 8 + Math.Min(WidestName, rows.Max(r => Roboto.Width(context.BusText(r.Bus), NameStyle(context, r))));
             double words = rows.SelectMany(r => TextsOf(context, r, beside)).Max(t => Roboto.Width(t, Look.Text with { Bold = true }));
-            double room = Math.Clamp(words + 12, 40, 250);
-            LinearScale across = LinearScale.FromZero(Math.Max(largest, furthest), 6);
-            var area = new Box(left, top, Picture.Width - Picture.Margin - room, bottom);
+            var area = new Box(left, top, Picture.Width - Picture.Margin, bottom);
+            double room = Math.Min(words + 14, MostWords * area.Width); // right of the longest bar, for its words
+            LinearScale across = LinearScale.FromZero(Math.Max(largest * area.Width / (area.Width - room), furthest * 1.02), 8);
             var panel = new Panel(area, across, LinearScale.Over(0, 1, 1));
             panel.DrawGrid(sheet, horizontal: false);
             for (int i = 0; i < rows.Length; i++)
             {
-                DrawRow(sheet, panel, context, rows[i], top + RowGap + i * rowHeight, beside, room);
+                DrawRow(sheet, panel, context, rows[i], top + RowGap + i * rowHeight, beside);
             }
 
             sheet.Outline(area, Look.Frame);
@@ -69,7 +72,7 @@ internal static class DistortionPicture
     private static TextStyle NameStyle(PictureContext context, BusThd row) =>
         Look.Text with { Anchor = Anchor.End, Bold = row.Bus == context.Settings.PccBus };
 
-    private static void DrawRow(Sheet sheet, Panel panel, PictureContext context, BusThd row, double y, bool beside, double room)
+    private static void DrawRow(Sheet sheet, Panel panel, PictureContext context, BusThd row, double y, bool beside)
     {
         int bars = beside ? row.Percent.Length : 1;
         double bottom = y + bars * BarHeight;
@@ -90,13 +93,13 @@ internal static class DistortionPicture
 
             bool exceeded = state is { } judged && row.Exceeded[judged];
             TextStyle style = Look.Text with { Bold = exceeded, Colour = exceeded ? Look.Limit : Look.Ink, Halo = true };
-            sheet.Write(Roboto.Fit(texts[i], style, room - 8), right + 6, barTop + BarHeight - 1.7, style);
+            sheet.Write(Roboto.Fit(texts[i], style, panel.Area.Right - right - 8), right + 5, barTop + BarHeight - 1.7, style);
         }
 
         foreach (ThdLimit limit in row.Limits.Where(l => l.Percent <= panel.Across.To))
         {
             double x = panel.X(limit.Percent);
-            sheet.Line(x, y - 3, x, bottom + 3, Look.LimitLine with { Width = 2.4, Dash = [] });
+            sheet.Line(x, y - 3, x, bottom + 3, ThdLimitStroke);
         }
     }
 
@@ -123,14 +126,12 @@ internal static class DistortionPicture
             entries.AddRange(context.Result.States.Select((s, i) => LegendEntry.Patch(s.State, Look.Bars[i])));
         }
 
-        foreach (BusThd row in rows)
+        foreach (var judged in rows.SelectMany(r => r.Limits.Select(l => (r.Bus, Limit: l))).GroupBy(j => j.Limit, j => j.Bus))
         {
-            foreach (ThdLimit limit in row.Limits)
-            {
-                string hidden = limit.Percent > furthest ? ", beyond this axis" : "";
-                entries.Add(LegendEntry.Line(
-                    $"THD limit at {row.Bus}, {limit.Standard}: {Figures.LimitPercent(limit.Percent)} %{hidden}", Look.LimitLine with { Width = 2.4, Dash = [] }));
-            }
+            string where = judged.Count() == 1 ? judged.First() : FormattableString.Invariant($"{judged.Count()} buses");
+            string hidden = judged.Key.Percent > furthest ? ", beyond this axis" : "";
+            entries.Add(LegendEntry.Line(
+                $"THD limit {Figures.LimitPercent(judged.Key.Percent)} % of {judged.Key.Standard} at {where}{hidden}", ThdLimitStroke));
         }
 
         return entries;

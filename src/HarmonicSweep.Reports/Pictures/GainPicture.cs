@@ -7,8 +7,9 @@ namespace HarmonicSweep.Reports.Pictures;
 internal static class GainPicture
 {
     private const double PanelHeight = 270;
+    private const double LabelRoom = 34;
 
-    private sealed record BusGain(string Bus, IReadOnlyList<double> Orders, IReadOnlyList<double?> Gain, double Peak, double PeakOrder, string PeakState);
+    private sealed record BusGain(string Bus, double[] Orders, double?[] Gain, double Peak, double PeakOrder, string PeakState);
 
     /// <summary>A picture for every point the background enters at.</summary>
     public static IEnumerable<Picture> Plan(PictureContext context)
@@ -37,21 +38,22 @@ internal static class GainPicture
         [
             .. drawn.Select((g, i) => LegendEntry.Line(context.BusText(g.Bus), Look.Series[i], DetailsOf(g, states))),
         ];
-        double top = Picture.HeaderHeight + OrderMarks.Room(injected), legendTop = top + PanelHeight + Panel.BottomRoom + 6;
+        LogScale up = LogScale.Covering(drawn.Select(g => g.Gain).Append([1]), LabelRoom / PanelHeight);
+        LinearScale across = LinearScale.Over(drawn.Min(g => g.Orders[0]), drawn.Max(g => g.Orders[^1]), 12);
+        double left = Panel.LeftRoom(up), right = Picture.Width - Picture.Margin;
+        double top = Picture.HeaderHeight + OrderMarks.Room(across, right - left, injected), legendTop = top + PanelHeight + Panel.BottomRoom + 6;
         double height = legendTop + Legend.Height(legend, Picture.Width - 2 * Picture.Margin) + 6;
         string which = all.Length == drawn.Length ? "" : FormattableString.Invariant($" · the {drawn.Length} of {all.Length} buses with the largest gain");
-        string subtitle = $"{context.CaseTitle} · {(states == 1 ? "" : "largest of ")}{context.StatesText(states)}{which}";
-        return new Picture("background-gain", $"Voltage gain from the background at {context.BusText(from)}", subtitle, height, sheet =>
+        string choices = $"{(states == 1 ? "" : "largest of ")}{context.StatesText(states)}{which}";
+        return new Picture("background-gain", $"Voltage gain from the background at {context.BusText(from)}", context.CaseTitle, choices, height, sheet =>
         {
-            LogScale up = LogScale.Covering(drawn.SelectMany(g => g.Gain).Select(g => g ?? 0).Append(1), 0.06);
-            LinearScale across = LinearScale.Over(drawn.Min(g => g.Orders[0]), drawn.Max(g => g.Orders[^1]), 12);
-            var panel = new Panel(new Box(Panel.LeftRoom(up), top, Picture.Width - Picture.Margin, top + PanelHeight), across, up);
+            var panel = new Panel(new Box(left, top, right, top + PanelHeight), across, up);
             panel.DrawGrid(sheet);
             sheet.Line(panel.Area.Left, panel.Y(1), panel.Area.Right, panel.Y(1), Look.Frame with { Width = 1.4 });
             OrderMarks.DrawLines(sheet, panel, injected);
             for (int i = drawn.Length - 1; i >= 0; i--)
             {
-                Curve.Draw(sheet, Curve.Runs(panel, drawn[i].Orders.Zip(drawn[i].Gain)), Look.Series[i]);
+                Curve.Draw(sheet, Curve.Runs(panel, drawn[i].Orders, drawn[i].Gain), Look.Series[i]);
             }
 
             DrawPeaks(sheet, panel, drawn);
@@ -60,7 +62,7 @@ internal static class GainPicture
             panel.DrawAcross(sheet, "Order h (frequency / fundamental)");
             if (drawn.All(g => g.Peak is 0))
             {
-                panel.DrawRemark(sheet, "no gain at any order");
+                panel.DrawRemark(sheet, "open: no path from the background at any order");
             }
 
             Legend.Draw(sheet, legend, Picture.Margin, legendTop, Picture.Width - 2 * Picture.Margin);
@@ -69,12 +71,18 @@ internal static class GainPicture
 
     private static void DrawPeaks(Sheet sheet, Panel panel, BusGain[] drawn)
     {
-        for (int i = 0; i < drawn.Length; i++)
+        var labels = new Labels(panel.Area);
+        var peaks = drawn.Select((g, i) => (g.Peak, g.PeakOrder, Look: Look.Series[i])).Where(p => p.Peak > 0).ToList();
+        foreach ((double peak, double order, SeriesLook look) in peaks)
         {
-            if (drawn[i].Peak > 0)
-            {
-                sheet.Mark(Look.Series[i].Mark, panel.X(drawn[i].PeakOrder), panel.Y(drawn[i].Peak), 3.2, Look.Series[i].Colour);
-            }
+            labels.ReserveMark(sheet, look, new Spot(panel.X(order), panel.Y(peak)));
+        }
+
+        foreach ((double peak, double order, SeriesLook look) in peaks.OrderByDescending(p => p.Peak))
+        {
+            labels.TryWrite(
+                sheet, new Spot(panel.X(order), panel.Y(peak)), Look.Small with { Colour = look.Colour, Bold = true },
+                $"h {Figures.ComputedOrder(order)}", $"{Figures.Short(peak)} pu");
         }
     }
 
@@ -82,32 +90,51 @@ internal static class GainPicture
     {
         if (gain.Peak is 0)
         {
-            return ["no gain"];
+            return ["open at every order"];
         }
 
         string peak = $"largest {Figures.Short(gain.Peak)} at order {Figures.ComputedOrder(gain.PeakOrder)}";
         return states == 1 ? [peak] : [peak, $"in {gain.PeakState}"];
     }
 
-    /// <summary>The largest gain of a bus over the states at every order.</summary>
+    /// <summary>The largest gain of a bus over the states at every order; a gap where it is open in all.</summary>
     private static BusGain LargestOver(PictureContext context, string from, string bus)
     {
-        var largest = new SortedDictionary<double, double?>();
+        double[] orders = [];
+        double?[] largest = [];
         double peak = 0, peakOrder = 0;
         string peakState = "";
         foreach (StateResult state in context.Result.States)
         {
-            foreach ((double order, double? gain) in state.Gains.Where(g => g.From == from && g.Bus == bus).SelectMany(g => g.Orders.Zip(g.Gain)))
+            foreach (BackgroundGain curve in state.Gains.Where(g => g.From == from && g.Bus == bus))
             {
-                double? before = largest.GetValueOrDefault(order);
-                largest[order] = before is null || gain > before ? gain ?? before : before;
-                if (gain > peak)
+                (orders, largest) = Merged(orders, largest, curve);
+                for (int i = 0; i < curve.Orders.Count; i++)
                 {
-                    (peak, peakOrder, peakState) = (gain.Value, order, state.State);
+                    if (curve.Gain[i] > peak)
+                    {
+                        (peak, peakOrder, peakState) = (curve.Gain[i]!.Value, curve.Orders[i], state.State);
+                    }
                 }
             }
         }
 
-        return new BusGain(bus, [.. largest.Keys], [.. largest.Values], peak, peakOrder, peakState);
+        return new BusGain(bus, orders, largest, peak, peakOrder, peakState);
+    }
+
+    private static (double[] Orders, double?[] Largest) Merged(double[] orders, double?[] largest, BackgroundGain curve)
+    {
+        var mergedOrders = new List<double>(orders.Length);
+        var merged = new List<double?>(orders.Length);
+        for (int i = 0, j = 0; i < orders.Length || j < curve.Orders.Count;)
+        {
+            double a = i < orders.Length ? orders[i] : double.PositiveInfinity;
+            double b = j < curve.Orders.Count ? curve.Orders[j] : double.PositiveInfinity;
+            double? left = a <= b ? largest[i++] : null, right = b <= a ? curve.Gain[j++] : null;
+            mergedOrders.Add(Math.Min(a, b));
+            merged.Add(left is null || right > left ? right ?? left : left);
+        }
+
+        return (mergedOrders.ToArray(), merged.ToArray());
     }
 }

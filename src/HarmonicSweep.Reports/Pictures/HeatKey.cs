@@ -13,7 +13,7 @@ internal static class HeatKey
 
     /// <summary>One scale for all panels of a picture, so that they can be compared.</summary>
     public static LogScale ScaleOf(IEnumerable<PositionMap> maps) =>
-        LogScale.Covering(maps.SelectMany(m => m.Ohm).SelectMany(row => row).Select(z => z?.Magnitude ?? 0));
+        LogScale.Covering(maps.SelectMany(m => m.Ohm).Select(row => row.Select(z => z?.Magnitude)));
 
     public static void Draw(Sheet sheet, LogScale shade, double top, double nearOrders)
     {
@@ -46,7 +46,7 @@ internal static class HeatKey
         sheet.Polygon([new(notes - 4, top + 29), new(notes + 3, top + 24), new(notes + 3, top + 34)], Look.Limit);
         sheet.Write(
             $"do not dwell: within {Figures.Order(nearOrders)} of an injected order", notes + 10, top + 32.5, Look.Text);
-        sheet.Line(notes, top + 41, notes, top + 53, Look.InjectedOrder with { Colour = Look.Ink, Width = 1 });
+        sheet.Line(notes, top + 41, notes, top + 53, Look.InjectedOrderOnShade);
         sheet.Write("injected order", notes + 10, top + 50.5, Look.Text);
     }
 }

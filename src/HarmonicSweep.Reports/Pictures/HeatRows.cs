@@ -34,7 +34,11 @@ internal static class HeatRows
                 }
                 else
                 {
-                    sheet.Polyline([new(left, top + rowHeight), new(right, top)], Look.Frame with { Width = 0.6 });
+                    sheet.Fill(box, Look.Span);
+                    if (box.Width > 40)
+                    {
+                        sheet.Write("open", (left + right) / 2, top + rowHeight / 2 + 4, Look.Note with { Anchor = Anchor.Middle });
+                    }
                 }
 
                 first = next;

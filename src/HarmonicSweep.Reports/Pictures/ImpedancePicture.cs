@@ -51,25 +51,28 @@ internal static class ImpedancePicture
     {
         string where = at == from ? $"at {context.BusText(at)}" : $"at {context.BusText(at)}, current injected at {from}";
         string title = $"{(at == from ? "Driving-point" : "Transfer")} impedance {where}";
-        string subtitle = $"{context.CaseTitle} · {sequence.ToString().ToLowerInvariant()} sequence · {context.StatesText(context.Result.States.Count)}";
+        string choices = $"{sequence.ToString().ToLowerInvariant()} sequence · {context.StatesText(context.Result.States.Count)}";
         double[] injected = [.. traces.SelectMany(t => t.InjectedOrders).Distinct().Order()];
 
         bool span = traces.Count > MostCurves;
         List<ImpedanceTrace> drawn = span ? Outstanding(traces) : traces;
-        List<LegendEntry> legend = LegendOf(drawn, span ? traces.Count : 0, without);
-        double top = Picture.HeaderHeight + OrderMarks.Room(injected);
-        double legendTop = top + MagnitudeHeight + PanelGap + AngleHeight + Panel.BottomRoom + 6;
+        List<LegendEntry> legend = LegendOf(drawn, at == from, span ? traces.Count : 0, without);
+        (Scale across, Scale ohm, Scale degrees) = Scales(traces);
+        double left = Panel.LeftRoom(ohm, degrees), right = Picture.Width - Picture.Margin;
+        double top = Picture.HeaderHeight + OrderMarks.Room(across, right - left, injected), bottom = top + MagnitudeHeight;
+        var magnitude = new Panel(new Box(left, top, right, bottom), across, ohm);
+        var angle = new Panel(new Box(left, bottom + PanelGap, right, bottom + PanelGap + AngleHeight), across, degrees);
+        double legendTop = angle.Area.Bottom + Panel.BottomRoom + 6;
         double height = legendTop + Legend.Height(legend, Picture.Width - 2 * Picture.Margin) + 6;
         string name = $"{(sequence == Sequence.Positive ? "" : sequence.ToString().ToLowerInvariant() + "-")}impedance-{at}{(at == from ? "" : $"-from-{from}")}";
-        return new Picture(name, title, subtitle, height, sheet =>
+        return new Picture(name, title, context.CaseTitle, choices, height, sheet =>
         {
-            (Panel magnitude, Panel angle) = Panels(traces, top);
             magnitude.DrawGrid(sheet);
             angle.DrawGrid(sheet);
             if (span)
             {
-                StateSpan.Draw(sheet, magnitude, traces, p => p.Ohm);
-                StateSpan.Draw(sheet, angle, traces, p => p.Degrees);
+                StateSpan.Draw(sheet, magnitude, traces, t => t.Ohm);
+                StateSpan.Draw(sheet, angle, traces, t => t.Degrees);
             }
 
             OrderMarks.DrawLines(sheet, magnitude, injected);
@@ -77,8 +80,8 @@ internal static class ImpedancePicture
             for (int i = drawn.Count - 1; i >= 0; i--) // the first state, mostly the base, comes on top
             {
                 SeriesLook look = Look.Series[i % Look.Series.Length];
-                Curve.Draw(sheet, Curve.Runs(magnitude, drawn[i].Points.Select(p => (p.Order, p.Ohm))), look);
-                Curve.Draw(sheet, Curve.Runs(angle, drawn[i].Points.Select(p => (p.Order, p.Degrees)), 180), look);
+                Curve.Draw(sheet, Curve.Runs(magnitude, drawn[i].Orders, drawn[i].Ohm), look);
+                Curve.Draw(sheet, Curve.Runs(angle, drawn[i].Orders, drawn[i].Degrees, 180), look);
             }
 
             DrawPeaks(sheet, magnitude, drawn);
@@ -95,16 +98,13 @@ internal static class ImpedancePicture
         });
     }
 
-    private static (Panel Magnitude, Panel Angle) Panels(List<ImpedanceTrace> traces, double top)
+    private static (Scale Across, Scale Ohm, Scale Degrees) Scales(List<ImpedanceTrace> traces)
     {
-        LinearScale across = LinearScale.Over(traces.Min(t => t.Curve.Orders[0]), traces.Max(t => t.Curve.Orders[^1]), 12);
-        LogScale ohm = LogScale.Covering(traces.SelectMany(t => t.Points).Select(p => p.Ohm ?? 0), LabelRoom / MagnitudeHeight);
-        bool wide = traces.Exists(t => t.Points.Any(p => p.Degrees is < -90.5 or > 90.5));
+        LinearScale across = LinearScale.Over(traces.Min(t => t.Orders[0]), traces.Max(t => t.Orders[^1]), 12);
+        LogScale ohm = LogScale.Covering(traces.Select(t => t.Ohm), LabelRoom / MagnitudeHeight);
+        bool wide = traces.Exists(t => Array.Exists(t.Degrees, d => d is < -90.5 or > 90.5));
         LinearScale degrees = wide ? LinearScale.Stepped(-180, 180, 90, 45) : LinearScale.Stepped(-90, 90, 45, 15);
-        double left = Panel.LeftRoom(ohm, degrees), right = Picture.Width - Picture.Margin;
-        double bottom = top + MagnitudeHeight;
-        return (new Panel(new Box(left, top, right, bottom), across, ohm),
-            new Panel(new Box(left, bottom + PanelGap, right, bottom + PanelGap + AngleHeight), across, degrees));
+        return (across, ohm, degrees);
     }
 
     /// <summary>Marks and labels of the parallel resonances, the highest first, since a label without room is left out.</summary>
@@ -114,16 +114,14 @@ internal static class ImpedancePicture
         var peaks = drawn.SelectMany((t, i) => t.Peaks.Select(p => (Peak: p, Look: Look.Series[i % Look.Series.Length]))).ToList();
         foreach ((Resonance peak, SeriesLook look) in peaks)
         {
-            double x = panel.X(peak.Order), y = panel.Y(peak.Ohm);
-            sheet.Mark(look.Mark, x, y, 3.2, look.Colour);
-            labels.Reserve(new Box(x - 4, y - 4, x + 4, y + 4));
+            labels.ReserveMark(sheet, look, new Spot(panel.X(peak.Order), panel.Y(peak.Ohm)));
         }
 
         foreach ((Resonance peak, SeriesLook look) in peaks.OrderByDescending(p => p.Peak.Ohm))
         {
             labels.TryWrite(
                 sheet, new Spot(panel.X(peak.Order), panel.Y(peak.Ohm)), Look.Small with { Colour = look.Colour, Bold = true },
-                Figures.ComputedOrder(peak.Order), Figures.Short(peak.Ohm) + " Ω");
+                $"h {Figures.ComputedOrder(peak.Order)}", $"{Figures.Short(peak.Ohm)} Ω");
         }
     }
 
@@ -134,12 +132,12 @@ internal static class ImpedancePicture
         return [.. traces.Where((t, i) => i == 0 || others.Contains(t))];
     }
 
-    private static List<LegendEntry> LegendOf(List<ImpedanceTrace> drawn, int spanStates, List<string> without)
+    private static List<LegendEntry> LegendOf(List<ImpedanceTrace> drawn, bool drivingPoint, int spanStates, List<string> without)
     {
         var entries = new List<LegendEntry>();
         for (int i = 0; i < drawn.Count; i++)
         {
-            entries.Add(LegendEntry.Line(drawn[i].State, Look.Series[i % Look.Series.Length], Details(drawn[i])));
+            entries.Add(LegendEntry.Line(drawn[i].State, Look.Series[i % Look.Series.Length], Details(drawn[i], drivingPoint)));
         }
 
         if (spanStates > 0)
@@ -151,18 +149,23 @@ internal static class ImpedancePicture
         }
 
         entries.AddRange(without.Take(MostCurves).Select(s => new LegendEntry(s, null, "bus dead or not scanned in this state")));
+        if (without.Count > MostCurves)
+        {
+            entries.Add(new LegendEntry(FormattableString.Invariant($"and {without.Count - MostCurves} more states"), null, "likewise"));
+        }
+
         return entries;
     }
 
-    private static string[] Details(ImpedanceTrace trace)
+    private static string[] Details(ImpedanceTrace trace, bool drivingPoint)
     {
         if (trace.IsOpen)
         {
             return ["open: no path to ground"];
         }
 
-        return trace.Peaks.Count == 0
-            ? [trace.Curve.At == trace.Curve.From ? "no parallel resonance in this range" : ""]
+        return trace.Peaks.Length == 0
+            ? [drivingPoint ? "no parallel resonance in this range" : ""]
             : ["parallel at", .. trace.Peaks.Select(p => $"{Figures.ComputedOrder(p.Order)}: {Figures.Short(p.Ohm)} Ω")];
     }
 }

@@ -1,20 +1,49 @@
-using System.Numerics;
 using HarmonicSweep.Studies;
 
 namespace HarmonicSweep.Reports.Pictures;
 
-/// <summary>A point of a trace; null = open.</summary>
-internal readonly record struct TracePoint(double Order, double? Ohm, double? Degrees);
-
 /// <summary>The impedance of one state, ready to draw: the resonances are points of it, whatever the spacing of the scan.</summary>
-internal sealed record ImpedanceTrace(
-    string State, ImpedanceCurve Curve, IReadOnlyList<TracePoint> Points, IReadOnlyList<Resonance> Peaks, IReadOnlyList<double> InjectedOrders)
+internal sealed class ImpedanceTrace
 {
+    private ImpedanceTrace(StateResult state, double[] orders, double?[] ohm, double?[] degrees, Resonance[] peaks)
+    {
+        State = state.State;
+        InjectedOrders = state.InjectedOrders;
+        Orders = orders;
+        Ohm = ohm;
+        Degrees = degrees;
+        Peaks = peaks;
+        double largest = 0;
+        foreach (double? z in ohm)
+        {
+            largest = Math.Max(largest, z ?? 0);
+            IsOpen &= z is null;
+        }
+
+        Highest = peaks.Length > 0 ? peaks.Max(p => p.Ohm) : largest;
+    }
+
+    public string State { get; }
+
+    /// <summary>Orders, ascending.</summary>
+    public double[] Orders { get; }
+
+    /// <summary>|Z| at every order; null = open.</summary>
+    public double?[] Ohm { get; }
+
+    /// <summary>Angle at every order, degrees; null = open.</summary>
+    public double?[] Degrees { get; }
+
+    /// <summary>Parallel resonances, ascending.</summary>
+    public Resonance[] Peaks { get; }
+
+    public IReadOnlyList<double> InjectedOrders { get; }
+
     /// <summary>No path to ground at any order.</summary>
-    public bool IsOpen => Points.All(p => p.Ohm is null);
+    public bool IsOpen { get; } = true;
 
     /// <summary>Largest parallel resonance, or largest |Z| without one, ohm.</summary>
-    public double Highest => Peaks.Count > 0 ? Peaks.Max(p => p.Ohm) : Points.Max(p => p.Ohm ?? 0);
+    public double Highest { get; }
 
     public static ImpedanceTrace Of(StateResult state, ImpedanceCurve curve)
     {
@@ -24,31 +53,41 @@ internal sealed record ImpedanceTrace(
             .. state.Resonances.Where(r => r.Sequence == curve.Sequence && r.Bus == curve.At && r.Order >= first && r.Order <= last)
                 .OrderBy(r => r.Order),
         ];
-        TracePoint[] scanned = [.. curve.Orders.Zip(curve.Ohm, PointOf).OrderBy(p => p.Order)];
-        var orders = curve.Orders.ToHashSet();
-        IEnumerable<TracePoint> refined = resonances.Where(r => !orders.Contains(r.Order))
-            .Select(r => new TracePoint(r.Order, r.Ohm, DegreesAt(scanned, r.Order)));
-        return new ImpedanceTrace(
-            state.State,
-            curve with { Orders = [.. scanned.Select(p => p.Order)], Ohm = [.. curve.Orders.Zip(curve.Ohm).OrderBy(p => p.First).Select(p => p.Second)] },
-            [.. scanned.Concat(scanned.Length > 1 ? refined : []).OrderBy(p => p.Order)],
-            [.. resonances.Where(r => r.Kind == ResonanceKind.Parallel)],
-            state.InjectedOrders);
-    }
-
-    private static TracePoint PointOf(double order, Complex? ohm) => ohm is { } z
-        ? new TracePoint(order, z.Magnitude, z.Phase * 180 / Math.PI)
-        : new TracePoint(order, null, null);
-
-    /// <summary>Angle between the scanned neighbours; a resonance is given by magnitude alone.</summary>
-    private static double? DegreesAt(TracePoint[] scanned, double order)
-    {
-        int after = Array.FindIndex(scanned, p => p.Order > order);
-        if (after <= 0 || scanned[after - 1] is not { Degrees: { } from } before || scanned[after].Degrees is not { } to)
+        int scanned = curve.Orders.Count, count = scanned + (scanned > 1 ? resonances.Length : 0);
+        var orders = new double[count];
+        var ohm = new double?[count];
+        var degrees = new double?[count];
+        var place = new int[count];
+        for (int i = 0; i < count; i++)
         {
-            return null;
+            orders[i] = i < scanned ? curve.Orders[i] : resonances[i - scanned].Order;
+            place[i] = i;
         }
 
-        return from + (to - from) * (order - before.Order) / (scanned[after].Order - before.Order);
+        Array.Sort(orders, place);
+        for (int i = 0; i < count; i++)
+        {
+            if (place[i] >= scanned)
+            {
+                ohm[i] = resonances[place[i] - scanned].Ohm;
+            }
+            else if (curve.Ohm[place[i]] is { } z)
+            {
+                ohm[i] = z.Magnitude;
+                degrees[i] = z.Phase * 180 / Math.PI;
+            }
+        }
+
+        for (int i = 1; i < count - 1; i++)
+        {
+            // a resonance is given by magnitude alone; its angle lies between those of its neighbours
+            if (place[i] >= scanned && degrees[i - 1] is { } before && degrees[i + 1] is { } after)
+            {
+                double span = orders[i + 1] - orders[i - 1];
+                degrees[i] = span > 0 ? before + (after - before) * (orders[i] - orders[i - 1]) / span : before;
+            }
+        }
+
+        return new ImpedanceTrace(state, orders, ohm, degrees, [.. resonances.Where(r => r.Kind == ResonanceKind.Parallel)]);
     }
 }

@@ -27,9 +27,24 @@ public static class PictureBook
         return [.. pictures.Select(p => p.Named(UniqueName(p.FileName, names)))];
     }
 
-    /// <summary>Characters in the titles that the embedded font cannot draw: the SVG has them, a PNG shows a box for each.</summary>
-    public static IReadOnlyList<string> MissingCharacters(IEnumerable<Picture> pictures) =>
-        [.. Drawing.Roboto.Missing(string.Concat(pictures.Select(p => p.Title)))];
+    /// <summary>
+    /// Characters of the case's names that the embedded font cannot draw, each once: the SVG has them, a PNG shows a box
+    /// for each. Worth a remark to the user.
+    /// </summary>
+    /// <param name="caseTitle">Title of the case.</param>
+    /// <param name="result">What was computed.</param>
+    public static IReadOnlyList<string> MissingCharacters(string caseTitle, StudyResult result)
+    {
+        IEnumerable<string> names =
+        [
+            caseTitle,
+            .. result.States.Select(s => s.State),
+            .. result.States.SelectMany(s => s.Impedance).Select(c => c.At),
+            .. result.States.SelectMany(s => s.Distortion).Select(d => d.Bus),
+            .. result.Screen?.Maps.Select(m => m.Bank) ?? [],
+        ];
+        return [.. Drawing.Roboto.Missing(string.Concat(names.Distinct()))];
+    }
 
     /// <summary>Draws the pictures and writes each as PNG and SVG; an earlier picture of the same name is replaced.</summary>
     /// <param name="pictures">Pictures of one plan.</param>
@@ -37,7 +52,7 @@ public static class PictureBook
     /// <param name="threads">Pictures drawn at the same time; the bytes do not depend on it.</param>
     /// <param name="cancellation">Stops between pictures; nothing new is left in the folder then.</param>
     /// <returns>Paths written, PNG and SVG of each picture in the order of the plan.</returns>
-    /// <exception cref="IOException">The folder cannot be written; nothing new is left in it.</exception>
+    /// <exception cref="IOException">The folder or a file in it cannot be written; no half-written picture is left.</exception>
     /// <exception cref="UnauthorizedAccessException">The folder may not be written; likewise.</exception>
     public static IReadOnlyList<string> Write(
         IReadOnlyList<Picture> pictures, string folder, int threads, CancellationToken cancellation = default)
@@ -59,9 +74,9 @@ public static class PictureBook
         }
         finally
         {
-            foreach (string path in paths.Select(Unfinished))
+            foreach (string path in paths.Select(Unfinished).Where(File.Exists))
             {
-                File.Delete(path); // nothing is there after success
+                File.Delete(path);
             }
         }
 

@@ -10,8 +10,11 @@ namespace HarmonicSweep.Reports.Pictures;
 internal static class PositionMapPicture
 {
     private const int MostPanels = 3;
+    private const int MostRows = 40;
     private const double PanelGap = 30;
     private const double FlagRoom = 118;
+
+    private static readonly TextStyle NameStyle = Look.Text with { Anchor = Anchor.End, Bold = true };
 
     /// <summary>A picture a bank and base state; further ones when there are more supply strengths than fit one.</summary>
     public static IEnumerable<Picture> Plan(PictureContext context)
@@ -23,46 +26,57 @@ internal static class PositionMapPicture
 
         foreach (var bank in screen.Maps.Where(m => m.Orders.Count > 0 && m.StepsIn.Count > 0).GroupBy(m => (m.BaseState, m.Bank)))
         {
-            foreach (PositionMap[] maps in bank.Chunk(MostPanels))
+            var page = new List<MapSection>();
+            foreach (MapSection section in bank.SelectMany(m => MapSection.Of(screen, m, MostRows)))
             {
-                yield return Of(context, screen, maps);
+                if (page.Count == MostPanels || (page.Count > 0 && page.Sum(s => s.Names.Length) + section.Names.Length > MostRows))
+                {
+                    yield return Of(context, screen, [.. page]);
+                    page.Clear();
+                }
+
+                page.Add(section);
             }
+
+            yield return Of(context, screen, [.. page]);
         }
     }
 
-    private static Picture Of(PictureContext context, ScreenResult screen, PositionMap[] maps)
+    private static Picture Of(PictureContext context, ScreenResult screen, MapSection[] sections)
     {
-        PositionMap first = maps[0];
+        PositionMap first = sections[0].Map;
+        PositionMap[] maps = [.. sections.Select(s => s.Map)];
         double[] injected = [.. maps.SelectMany(m => m.InjectedOrders).Distinct().Order()];
-        double above = OrderMarks.Room(injected) + 16, rowHeight = Math.Clamp(260.0 / maps.Max(m => m.StepsIn.Count), 14, 24);
-        double[] tops = new double[maps.Length];
+        LinearScale across = LinearScale.Over(maps.Min(m => m.Orders[0]), maps.Max(m => m.Orders[^1]), 12);
+        double left = Math.Ceiling(Picture.Margin + 26 + sections.SelectMany(s => s.Names).Max(n => Roboto.Width(n, NameStyle)));
+        double right = Picture.Width - Picture.Margin - FlagRoom;
+        double above = OrderMarks.Room(across, right - left, injected) + 16, rowHeight = Math.Clamp(260.0 / sections.Max(s => s.Names.Length), 14, 24);
+        double[] tops = new double[sections.Length];
         double y = Picture.HeaderHeight;
-        for (int i = 0; i < maps.Length; i++)
+        for (int i = 0; i < sections.Length; i++)
         {
             tops[i] = y + above;
-            y = tops[i] + maps[i].StepsIn.Count * rowHeight + (i < maps.Length - 1 ? PanelGap : Panel.BottomRoom);
+            y = tops[i] + sections[i].Names.Length * rowHeight + (i < sections.Length - 1 ? PanelGap : Panel.BottomRoom);
         }
 
         double keyTop = y + 8;
-        string subtitle = $"{context.CaseTitle} · from state {first.BaseState} · bank positions down, order across";
-        return new Picture($"positions-{first.Bank}-{first.BaseState}", $"|Z| at {context.BusText(first.Bus)} over the positions of {first.Bank}", subtitle, keyTop + HeatKey.Height, sheet =>
+        string choices = $"from state {first.BaseState} · bank positions down, order across";
+        return new Picture($"positions-{first.Bank}-{first.BaseState}", $"|Z| at {context.BusText(first.Bus)} over the positions of {first.Bank}", context.CaseTitle, choices, keyTop + HeatKey.Height, sheet =>
         {
             LogScale shade = HeatKey.ScaleOf(maps);
-            LinearScale across = LinearScale.Over(maps.Min(m => m.Orders[0]), maps.Max(m => m.Orders[^1]), 12);
-            for (int i = 0; i < maps.Length; i++)
+            for (int i = 0; i < sections.Length; i++)
             {
-                BankPosition?[] rows = PositionsOf(screen, maps[i]);
-                string[] names = [.. maps[i].StepsIn.Select((s, r) => NameOf(s, rows[r]))];
-                double left = Math.Ceiling(Picture.Margin + 26 + names.Max(n => Roboto.Width(n, Look.Text)));
-                var area = new Box(left, tops[i], Picture.Width - Picture.Margin - FlagRoom, tops[i] + names.Length * rowHeight);
+                string[] names = sections[i].Names;
+                var area = new Box(left, tops[i], right, tops[i] + names.Length * rowHeight);
                 var panel = new Panel(area, across, new CategoryScale(names));
-                DrawPanel(sheet, panel, maps[i], shade, rows, rowHeight);
-                OrderMarks.DrawLines(sheet, panel, injected, halo: true);
+                HeatRows.Draw(sheet, panel, maps[i], shade, rowHeight);
+                OrderMarks.DrawLines(sheet, panel, injected, shaded: true);
+                DrawRows(sheet, panel, sections[i].Positions, rowHeight);
                 OrderMarks.DrawNumbers(sheet, panel, injected);
                 sheet.Outline(area, Look.Frame);
-                sheet.Write($"Supply strength: {StrengthText(maps[i].Strength)}", area.Left, tops[i] - above + 12, Look.Text with { Bold = true });
+                sheet.Write($"Supply strength: {sections[i].StrengthText}", area.Left, tops[i] - above + 12, Look.Text with { Bold = true });
                 sheet.Write("Steps in", Picture.Margin + 2, (area.Top + area.Bottom) / 2, Look.AxisTitleTurned);
-                if (i == maps.Length - 1)
+                if (i == sections.Length - 1)
                 {
                     panel.DrawAcross(sheet, "Order h");
                 }
@@ -72,16 +86,15 @@ internal static class PositionMapPicture
         });
     }
 
-    private static void DrawPanel(Sheet sheet, Panel panel, PositionMap map, LogScale shade, BankPosition?[] rows, double rowHeight)
+    private static void DrawRows(Sheet sheet, Panel panel, BankPosition?[] rows, double rowHeight)
     {
-        HeatRows.Draw(sheet, panel, map, shade, rowHeight);
         for (int row = 0; row < rows.Length; row++)
         {
             double top = panel.Area.Top + row * rowHeight, middle = top + rowHeight / 2;
             bool flagged = rows[row]?.DoNotDwell == true;
             sheet.Line(panel.Area.Left, top, panel.Area.Right, top, new Stroke(Look.Paper, 1));
             sheet.Write(
-                panel.Up.Ticks[row].Label!, panel.Area.Left - 7, middle + 4, Look.Text with { Anchor = Anchor.End, Bold = flagged });
+                panel.Up.Ticks[row].Label!, panel.Area.Left - 7, middle + 4, NameStyle with { Bold = flagged });
             foreach (Resonance peak in rows[row]?.ParallelResonances ?? [])
             {
                 if (peak.Order >= panel.Across.From && peak.Order <= panel.Across.To)
@@ -105,26 +118,4 @@ internal static class PositionMapPicture
             : "avoid";
         sheet.Write(Roboto.Fit(why, Look.Text with { Bold = true }, FlagRoom - 14), right + 14, y + 4, Look.Text with { Bold = true, Colour = Look.Limit });
     }
-
-    /// <summary>The screened position of every row: by place when the lists match, else by the number of steps.</summary>
-    private static BankPosition?[] PositionsOf(ScreenResult screen, PositionMap map)
-    {
-        BankPosition[] positions =
-        [
-            .. screen.Positions.Where(p => p.BaseState == map.BaseState && p.Bank == map.Bank && p.Strength == map.Strength),
-        ];
-        bool matches = positions.Select(p => p.StepsIn).SequenceEqual(map.StepsIn);
-        return [.. map.StepsIn.Select((steps, row) => matches ? positions[row] : Array.Find(positions, p => p.StepsIn == steps))];
-    }
-
-    private static string NameOf(int stepsIn, BankPosition? position) => position is null
-        ? FormattableString.Invariant($"{stepsIn}")
-        : FormattableString.Invariant($"{stepsIn} of {position.Steps} · {position.KvarIn:0} kvar");
-
-    private static string StrengthText(string strength) => strength switch
-    {
-        "max" => "maximum",
-        "min" => "minimum",
-        _ => strength + " MVA",
-    };
 }

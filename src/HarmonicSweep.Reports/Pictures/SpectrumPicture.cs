@@ -10,6 +10,7 @@ namespace HarmonicSweep.Reports.Pictures;
 internal static class SpectrumPicture
 {
     private const int MostBars = 110;
+    private const int MostLetters = 56;
     private const int MostBusesUnasked = 12;
     private const double PanelHeight = 230;
     private const double HeadRoom = 1.12;
@@ -57,13 +58,14 @@ internal static class SpectrumPicture
         List<LegendEntry> legend = LegendOf(spectrum, beside, largest);
         double top = Picture.HeaderHeight + 6, legendTop = top + PanelHeight + Panel.BottomRoom + 6;
         double height = legendTop + Legend.Height(legend, Picture.Width - 2 * Picture.Margin) + 6;
-        string subtitle = $"{context.CaseTitle} · {context.RuleText} · {context.StatesText(spectrum.States.Count)}";
-        return new Picture($"voltage-spectrum-{spectrum.Bus}", $"Harmonic voltages at {context.BusText(spectrum.Bus)}", subtitle, height, sheet =>
+        string choices = $"{context.RuleText} · {context.StatesText(spectrum.States.Count)}";
+        return new Picture($"voltage-spectrum-{spectrum.Bus}", $"Harmonic voltages at {context.BusText(spectrum.Bus)}", context.CaseTitle, choices, height, sheet =>
         {
             LinearScale up = LinearScale.FromZero(Math.Max(largest * HeadRoom, highestLimit * 1.06), 6);
             var across = new CategoryScale([.. spectrum.Orders.Select(Figures.Order)]);
             var panel = new Panel(new Box(Panel.LeftRoom(up), top, Picture.Width - Picture.Margin, top + PanelHeight), across, up);
             panel.DrawGrid(sheet, vertical: false);
+            DrawLimits(sheet, panel, spectrum);
             if (beside)
             {
                 DrawBeside(sheet, panel, spectrum);
@@ -73,12 +75,13 @@ internal static class SpectrumPicture
                 DrawWorst(sheet, panel, spectrum);
             }
 
-            DrawLimits(sheet, panel, spectrum);
             panel.DrawFrame(sheet, "Voltage (% of nominal)");
             panel.DrawAcross(sheet, "Order h");
             Legend.Draw(sheet, legend, Picture.Margin, legendTop, Picture.Width - 2 * Picture.Margin);
         });
     }
+
+    private static bool HasLetters(BusSpectrum spectrum) => spectrum.Orders.Count <= MostLetters;
 
     private static void DrawBeside(Sheet sheet, Panel panel, BusSpectrum spectrum)
     {
@@ -98,7 +101,6 @@ internal static class SpectrumPicture
 
     private static void DrawWorst(Sheet sheet, Panel panel, BusSpectrum spectrum)
     {
-        bool letters = panel.X(1) - panel.X(0) >= 9;
         for (int order = 0; order < spectrum.Orders.Count; order++)
         {
             if (spectrum.WorstState(order) is not { } worst)
@@ -108,9 +110,9 @@ internal static class SpectrumPicture
 
             double percent = spectrum.Percent[worst][order]!.Value;
             DrawBar(sheet, panel, order + 0.2, order + 0.8, percent, Look.Bars[0], spectrum.Exceeded[worst][order]);
-            double lowest = panel.Y(spectrum.Percent.Min(p => p[order] ?? 0));
+            double lowest = panel.Y(spectrum.Percent.Min(p => p[order])!.Value);
             sheet.Line(panel.X(order + 0.1), lowest, panel.X(order + 0.9), lowest, new Stroke(Look.Bars[1], 2));
-            if (letters)
+            if (HasLetters(spectrum))
             {
                 double lift = spectrum.Exceeded[worst][order] ? 12 : 3;
                 sheet.Write(
@@ -130,10 +132,11 @@ internal static class SpectrumPicture
 
         if (exceeded)
         {
-            double x = (bar.Left + bar.Right) / 2, y = bar.Top - 3;
-            sheet.Polygon([new(x, y), new(x - 3.5, y - 6.5), new(x + 3.5, y - 6.5)], Look.Limit);
+            sheet.Polygon(ExceededMark((bar.Left + bar.Right) / 2, bar.Top - 3), Look.Limit);
         }
     }
+
+    private static Spot[] ExceededMark(double x, double y) => [new(x, y), new(x - 3.5, y - 6.5), new(x + 3.5, y - 6.5)];
 
     private static void DrawLimits(Sheet sheet, Panel panel, BusSpectrum spectrum)
     {
@@ -141,13 +144,6 @@ internal static class SpectrumPicture
         {
             double y = panel.Y(limit.Percent);
             sheet.Line(panel.X(limit.FirstSlot), y, panel.X(limit.LastSlot + 1), y, Look.LimitLine);
-        }
-
-        foreach (SpectrumLimit limit in spectrum.Limits.Where(l => l.Percent <= panel.Up.To).DistinctBy(l => (l.Standard, l.Percent)))
-        {
-            sheet.Write(
-                $"{Figures.LimitPercent(limit.Percent)} %", panel.X(limit.LastSlot + 1) - 4, panel.Y(limit.Percent) - 4,
-                Look.Small with { Colour = Look.Limit, Bold = true, Anchor = Anchor.End, Halo = true });
         }
     }
 
@@ -161,9 +157,9 @@ internal static class SpectrumPicture
         }
         else
         {
-            entries.Add(LegendEntry.Patch(FormattableString.Invariant($"worst of {spectrum.States.Count} states, its letter above"), Look.Bars[0]));
-            entries.Add(LegendEntry.Line("lowest of them (0 where the bus is dead)", new Stroke(Look.Bars[1], 2)));
-            entries.AddRange(spectrum.LetteredStates.Select(s => LegendEntry.Key(spectrum.States[s], spectrum.LetterOf(s))));
+            entries.Add(LegendEntry.Patch(FormattableString.Invariant($"worst of {spectrum.States.Count} states{(HasLetters(spectrum) ? ", its letter above" : "")}"), Look.Bars[0]));
+            entries.Add(LegendEntry.Line("lowest of them", new Stroke(Look.Bars[1], 2)));
+            entries.AddRange(spectrum.LetteredStates.Where(_ => HasLetters(spectrum)).Select(s => LegendEntry.Key(spectrum.States[s], spectrum.LetterOf(s))));
         }
 
         foreach (var limits in spectrum.Limits.GroupBy(l => l.Standard))
@@ -177,7 +173,7 @@ internal static class SpectrumPicture
         if (spectrum.Exceeded.Any(e => e.Contains(true)))
         {
             entries.Add(new LegendEntry("limit exceeded", (sheet, box) => sheet.Polygon(
-                [new(box.Right - 7, box.Bottom - 4), new(box.Right - 10.5, box.Bottom - 10.5), new(box.Right - 3.5, box.Bottom - 10.5)], Look.Limit)));
+                ExceededMark((box.Left + box.Right) / 2, box.Bottom - 4), Look.Limit)));
         }
 
         return entries;

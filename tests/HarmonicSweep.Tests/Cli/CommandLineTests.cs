@@ -117,14 +117,6 @@ public class CommandLineTests
         Assert.Contains("3 errors, 1 warning\n", outcome.Error, StringComparison.Ordinal);
     }
 
-    [Theory]
-    [InlineData("impedance", "impedence", "check", "impedance")]
-    [InlineData("LV-1", "lv1", "LV-1", "LV-2")]
-    [InlineData(null, "generator", "BUS-1", "BUS-2")]
-    [InlineData(null, "x", "a", "b")]
-    public void Nearest_word_is_close_or_none(string? expected, string typed, params string[] known) =>
-        Assert.Equal(expected, NearestWord.Find(typed, known));
-
     private static async Task<StudyRequest> Request(params string[] args)
     {
         var hsweep = new Hsweep();

@@ -10,7 +10,7 @@ namespace HarmonicSweep.Tests.Cli;
 internal sealed class Hsweep
 {
     private RunStudy? _study;
-    private (CaseFile? Case, IReadOnlyList<Finding> Findings) _read = (SampleResult.Case, SampleResult.Case.Findings);
+    private CaseReadResult _read = new(SampleResult.Case, SampleResult.Case.Findings);
 
     /// <summary>Requests the studies were given.</summary>
     public List<(string Study, StudyRequest Request)> Asked { get; } = [];
@@ -25,7 +25,7 @@ internal sealed class Hsweep
     public static Hsweep Doing(RunStudy study) => new() { _study = study };
 
     /// <summary>The case is refused with these findings.</summary>
-    public static Hsweep Refusing(params Finding[] findings) => new() { _read = (null, findings) };
+    public static Hsweep Refusing(params Finding[] findings) => new() { _read = new CaseReadResult(null, findings) };
 
     /// <summary>Runs one command line.</summary>
     public Task<Outcome> Run(params string[] args) => Run(CancellationToken.None, args);

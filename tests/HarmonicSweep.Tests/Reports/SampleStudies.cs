@@ -117,7 +117,7 @@ internal sealed record SampleStudies
     /// <summary>Peaks of a fine grid; good to the spacing of the grid, which is all a picture needs.</summary>
     private IEnumerable<Resonance> Peaks(string bus, Func<double, double> ohm)
     {
-        const double step = 0.002;
+        const double step = 0.005;
         for (double h = FromOrder + step; h < ToOrder - step; h += step)
         {
             double z = ohm(h);
