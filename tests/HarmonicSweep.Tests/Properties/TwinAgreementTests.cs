@@ -18,7 +18,7 @@ public sealed class TwinAgreementTests
     [MemberData(nameof(Batches))]
     public void Impedance_of_random_plants_agrees_with_the_twin(int batch)
     {
-        foreach (RandomPlant grown in Plants(batch, 8))
+        foreach (RandomPlant grown in Plants(batch, 6))
         {
             // the study solves the power flow of a state before it scans, and gives up where that has no solution
             foreach (OperatingState state in grown.States.Where(s => TwinPowerFlow.Solve(new PlantInState(grown.Plant, s)).IsPlain))

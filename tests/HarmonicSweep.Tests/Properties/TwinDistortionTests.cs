@@ -24,7 +24,7 @@ public sealed class TwinDistortionTests
     public void Distortion_of_random_plants_agrees_with_the_twin(int batch)
     {
         int compared = 0;
-        for (int seed = 20 * batch; seed < 20 * (batch + 1); seed++)
+        for (int seed = 14 * batch; seed < 14 * (batch + 1); seed++)
         {
             RandomPlant grown = RandomPlant.Grow(seed);
             foreach (OperatingState state in grown.States)
@@ -38,7 +38,7 @@ public sealed class TwinDistortionTests
             }
         }
 
-        // of 60 plant-states; the others have no plain solution at the fundamental
-        Assert.InRange(compared, 50, 60);
+        // of 42 plant-states; the others have no plain solution at the fundamental
+        Assert.InRange(compared, 36, 42);
     }
 }

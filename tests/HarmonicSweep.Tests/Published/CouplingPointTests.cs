@@ -51,6 +51,22 @@ public sealed class CouplingPointTests
         Assert.All(currents, l => Assert.False(string.IsNullOrWhiteSpace(l.Why)));
     }
 
+    /// <summary>I_SC comes from the supplies alone at their maximum, whatever the state: neither a weak grid nor a generator moves the row (ratio 50, TDD 12 %).</summary>
+    [Fact]
+    public void Row_of_the_current_table_does_not_follow_the_state()
+    {
+        Generator generator = new() { Name = "G", Location = PlantKit.Here, Bus = "B", RatedMva = 40, RatedKv = 10, PMw = 0.5, ReactancePu = 0.2 };
+        Plant plant = PlantKit.Plant(
+            60, [PlantKit.Bus("B", 10)], _supply with { ShortCircuitMvaMin = 40 }, generator,
+            PlantKit.Converter("C", "B", 1900, 0.95, PlantKit.Spectrum("six", (1, 100, 0), (5, 20, 0))));
+        StudyRequest request = ProductSide.Request(plant, new OperatingState("weak", [new ShortCircuitSetting("S", ShortCircuitLevel.Min)]));
+        request = request with { Settings = request.Settings with { PccBus = "B", Standards = ["ieee519-2022"] } };
+        foreach (StateResult result in DistortionStudy.Run(request, progress: null, CancellationToken.None).States)
+        {
+            Assert.Equal(12, Assert.Single(result.Limits, l => l.Quantity == "TDD").LimitPercent);
+        }
+    }
+
     /// <summary>Voltage divider: with an EMF behind the supply and a bank on the bus, V/E = Z_C/(Z_S + Z_C).</summary>
     [Fact]
     public void Gain_from_background_to_a_bank_is_the_voltage_divider()
