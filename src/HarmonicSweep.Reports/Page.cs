@@ -53,7 +53,34 @@ internal sealed class Page(string title, string subtitle, IReadOnlyList<Panel> p
         string text = Encoding.UTF8.GetString(stream.GetBuffer(), 0, (int)stream.Length)
             .Replace(size, box, StringComparison.Ordinal)
             .Replace($"font-family=\"{EmbeddedFonts.Name}\"", $"font-family=\"{EmbeddedFonts.Name}, Arial, sans-serif\"", StringComparison.Ordinal);
-        return Encoding.UTF8.GetBytes(text);
+        return Encoding.UTF8.GetBytes(Renumbered(text));
+    }
+
+    /// <summary>
+    /// The drawing library numbers clip paths over the whole process, so the same picture would differ from run to run: they
+    /// are numbered anew in the order they appear.
+    /// </summary>
+    private static string Renumbered(string svg)
+    {
+        const string Prefix = "cl_";
+        var numbers = new Dictionary<string, int>(StringComparer.Ordinal);
+        var text = new StringBuilder(svg.Length);
+        int from = 0;
+        for (int at = svg.IndexOf(Prefix, StringComparison.Ordinal); at >= 0; at = svg.IndexOf(Prefix, from, StringComparison.Ordinal))
+        {
+            int end = at + Prefix.Length;
+            while (end < svg.Length && char.IsAsciiHexDigitLower(svg[end]))
+            {
+                end++;
+            }
+
+            string id = svg[at..end];
+            numbers.TryAdd(id, numbers.Count);
+            text.Append(svg, from, at - from).Append(Prefix).Append(numbers[id]);
+            from = end;
+        }
+
+        return text.Append(svg, from, svg.Length - from).ToString();
     }
 
     private void Draw(SKCanvas canvas)
@@ -74,7 +101,11 @@ internal sealed class Page(string title, string subtitle, IReadOnlyList<Panel> p
     {
         var label = new LabelStyle
         {
-            Text = EmbeddedFonts.Fit(text, size, Width - 2 * Margin), FontSize = size, Bold = bold, ForeColor = colour, Alignment = Alignment.LowerLeft,
+            Text = EmbeddedFonts.Fit(text, size, Width - 2 * Margin),
+            FontSize = size,
+            Bold = bold,
+            ForeColor = colour,
+            Alignment = Alignment.LowerLeft,
         };
         label.Render(canvas, new Pixel(Margin, y), paint);
     }

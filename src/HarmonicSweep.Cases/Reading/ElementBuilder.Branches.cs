@@ -24,7 +24,10 @@ internal sealed partial class ElementBuilder
 
         return new Coupler
         {
-            Name = row.Name, Location = row.Location, EndA = row.Text("end_a"), EndB = row.Text("end_b"),
+            Name = row.Name,
+            Location = row.Location,
+            EndA = row.Text("end_a"),
+            EndB = row.Text("end_b"),
             Closed = YesNo.Parse(row.Word("closed", "yes", "default"))!.Value,
         };
     }
@@ -55,11 +58,19 @@ internal sealed partial class ElementBuilder
         ResistanceLaw? law = ResistanceLawCell.Read(row, isCable ? "cable" : "line", () => BesselOf(row, resistance));
         return law is null ? null : new Line
         {
-            Name = row.Name, Location = row.Location, EndA = row.Text("end_a"), EndB = row.Text("end_b"), IsCable = isCable,
-            LengthKm = row.Number("length_km"), ResistanceOhmPerKm = resistance, ReactanceOhmPerKm = reactance,
+            Name = row.Name,
+            Location = row.Location,
+            EndA = row.Text("end_a"),
+            EndB = row.Text("end_b"),
+            IsCable = isCable,
+            LengthKm = row.Number("length_km"),
+            ResistanceOhmPerKm = resistance,
+            ReactanceOhmPerKm = reactance,
             CapacitanceNanofaradPerKm = row.Number("capacitance_nf_km", 0, "no capacitance given"),
-            Circuits = (int)row.Number("circuits", 1, "default"), Law = law,
-            ConductorMm2 = row.Find("conductor_mm2"), AmpacityA = row.Find("ampacity_a"),
+            Circuits = (int)row.Number("circuits", 1, "default"),
+            Law = law,
+            ConductorMm2 = row.Find("conductor_mm2"),
+            AmpacityA = row.Find("ampacity_a"),
         };
     }
 
@@ -83,9 +94,13 @@ internal sealed partial class ElementBuilder
 
         return new SeriesReactor
         {
-            Name = row.Name, Location = row.Location, EndA = row.Text("end_a"), EndB = row.Text("end_b"),
+            Name = row.Name,
+            Location = row.Location,
+            EndA = row.Text("end_a"),
+            EndB = row.Text("end_b"),
             ReactanceOhm = row.Find("x_ohm") ?? 2 * Math.PI * fundamentalHz * row.Number("l_mh") / 1000,
-            QualityFactor = row.Number("q_factor"), Law = law,
+            QualityFactor = row.Number("q_factor"),
+            Law = law,
         };
     }
 
@@ -113,10 +128,21 @@ internal sealed partial class ElementBuilder
         Plausibility.TransformerRating(row, rated, lv, impedance);
         return resistance is null || law is null || group is null ? null : new Transformer
         {
-            Name = row.Name, Location = row.Location, EndA = row.Text("hv_side"), EndB = row.Text("lv_side"),
-            RatedMva = rated, HvKv = hv, LvKv = lv, ImpedancePercent = impedance, ResistancePercent = resistance.Value,
-            Group = group.Value, TapPercent = row.Number("tap_percent", 0, "middle tap"), Law = law, EddyLossPu = eddy,
-            NoLoadLossKw = row.Find("no_load_loss_kw") ?? 0, NoLoadCurrentPercent = row.Find("no_load_current_percent") ?? 0,
+            Name = row.Name,
+            Location = row.Location,
+            EndA = row.Text("hv_side"),
+            EndB = row.Text("lv_side"),
+            RatedMva = rated,
+            HvKv = hv,
+            LvKv = lv,
+            ImpedancePercent = impedance,
+            ResistancePercent = resistance.Value,
+            Group = group.Value,
+            TapPercent = row.Number("tap_percent", 0, "middle tap"),
+            Law = law,
+            EddyLossPu = eddy,
+            NoLoadLossKw = row.Find("no_load_loss_kw") ?? 0,
+            NoLoadCurrentPercent = row.Find("no_load_current_percent") ?? 0,
         };
     }
 

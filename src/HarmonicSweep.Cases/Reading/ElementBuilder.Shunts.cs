@@ -36,10 +36,16 @@ internal sealed partial class ElementBuilder
 
         return new Supply
         {
-            Name = row.Name, Location = row.Location, Bus = row.Text("bus"),
-            VoltagePu = row.Number("voltage_pu", 1, "default"), AngleDeg = row.Number("angle_deg", 0, "default"),
-            ShortCircuitMvaMax = maximum, ShortCircuitMvaMin = least ?? maximum, XOverR = xOverR,
-            Background = background, DemandMva = row.Find("demand_mva"),
+            Name = row.Name,
+            Location = row.Location,
+            Bus = row.Text("bus"),
+            VoltagePu = row.Number("voltage_pu", 1, "default"),
+            AngleDeg = row.Number("angle_deg", 0, "default"),
+            ShortCircuitMvaMax = maximum,
+            ShortCircuitMvaMin = least ?? maximum,
+            XOverR = xOverR,
+            Background = background,
+            DemandMva = row.Find("demand_mva"),
         };
     }
 
@@ -77,8 +83,13 @@ internal sealed partial class ElementBuilder
         double quadrature = row.Has("x2_pu") ? direct : row.Number("xq2_pu", direct, "xq2_pu = xd2_pu");
         return new Generator
         {
-            Name = row.Name, Location = row.Location, Bus = row.Text("bus"), RatedMva = row.Number("rated_mva"), RatedKv = RatedKv(row),
-            PMw = row.Number("p_mw", 0, "default"), VoltagePu = row.Number("voltage_pu", 1, "default"),
+            Name = row.Name,
+            Location = row.Location,
+            Bus = row.Text("bus"),
+            RatedMva = row.Number("rated_mva"),
+            RatedKv = RatedKv(row),
+            PMw = row.Number("p_mw", 0, "default"),
+            VoltagePu = row.Number("voltage_pu", 1, "default"),
             ReactancePu = row.Find("x2_pu") ?? (direct + quadrature) / 2,
             ResistancePu = row.Number("ra_pu", 0, "no armature resistance given"),
         };
@@ -101,17 +112,22 @@ internal sealed partial class ElementBuilder
             "none" => LoadModel.None,
             _ => LoadModel.Parallel,
         };
-        if (model == LoadModel.Cigre && reactive <= 0.74 / 6.7 * active)
+        if (model == LoadModel.Cigre && (active <= 0 || reactive <= 0.74 / 6.7 * active))
         {
             row.Error(
-                Ids.Rule, "model", $"{row.Name}: the model cigre needs Q/P above 0.1104 (0.74/6.7); Q/P is {(active > 0 ? reactive / active : 0).Plain()}.",
+                Ids.Rule, "model", $"{row.Name}: the model cigre needs P above 0 and Q/P above 0.1104 (0.74/6.7); P is {active.Plain()} kW, Q is {reactive.Plain()} kvar.",
                 "use the model parallel, or check the power factor.");
         }
 
         Plausibility.Kilowatt(row, "p_kw", active, NominalOf(row));
         return new LinearLoad
         {
-            Name = row.Name, Location = row.Location, Bus = row.Text("bus"), PKw = active, QKvar = reactive, Model = model,
+            Name = row.Name,
+            Location = row.Location,
+            Bus = row.Text("bus"),
+            PKw = active,
+            QKvar = reactive,
+            Model = model,
             MotorSharePercent = row.Number("motor_share_percent", 0, "no motor share given"),
         };
     }
@@ -122,8 +138,13 @@ internal sealed partial class ElementBuilder
         Plausibility.Kilowatt(row, "rated_kw", row.Number("rated_kw"), NominalOf(row));
         return new Motor
         {
-            Name = row.Name, Location = row.Location, Bus = row.Text("bus"), RatedKw = row.Number("rated_kw"), RatedKv = RatedKv(row),
-            EfficiencyPercent = row.Number("efficiency_percent"), PowerFactor = row.Number("power_factor"),
+            Name = row.Name,
+            Location = row.Location,
+            Bus = row.Text("bus"),
+            RatedKw = row.Number("rated_kw"),
+            RatedKv = RatedKv(row),
+            EfficiencyPercent = row.Number("efficiency_percent"),
+            PowerFactor = row.Number("power_factor"),
             LoadingPercent = row.Number("loading_percent", 100, "default"),
             LockedRotorPu = row.Number("locked_rotor_pu", 6, "usual value"),
             LockedRotorPowerFactor = row.Number("locked_rotor_pf", 0.2, "usual value"),
@@ -152,9 +173,18 @@ internal sealed partial class ElementBuilder
         Plausibility.BankVoltage(row, rated, nominal, row.Number("rated_kvar"), detuning);
         return new CapacitorBank
         {
-            Name = row.Name, Location = row.Location, Bus = row.Text("bus"), RatedKvar = row.Number("rated_kvar"), RatedKv = rated,
-            Steps = steps, StepsIn = stepsIn, Connection = ConnectionOf(row), DetuningPercent = detuning,
-            ReactorQ = row.Find("reactor_q"), LossWPerKvar = loss, TolerancePercent = row.Find("tolerance_percent"),
+            Name = row.Name,
+            Location = row.Location,
+            Bus = row.Text("bus"),
+            RatedKvar = row.Number("rated_kvar"),
+            RatedKv = rated,
+            Steps = steps,
+            StepsIn = stepsIn,
+            Connection = ConnectionOf(row),
+            DetuningPercent = detuning,
+            ReactorQ = row.Find("reactor_q"),
+            LossWPerKvar = loss,
+            TolerancePercent = row.Find("tolerance_percent"),
         };
     }
 
@@ -201,9 +231,17 @@ internal sealed partial class ElementBuilder
         double nominal = NominalOf(row);
         return new Filter
         {
-            Name = row.Name, Location = row.Location, Bus = row.Text("bus"), Kind = kind, RatedKvar = row.Number("rated_kvar"),
-            RatedKv = row.Number("rated_kv", nominal, NominalKv), TunedOrder = tuned, SecondOrder = second,
-            QualityFactor = row.Find("q_factor"), DampingOhm = row.Find("damping_ohm"), Connection = ConnectionOf(row),
+            Name = row.Name,
+            Location = row.Location,
+            Bus = row.Text("bus"),
+            Kind = kind,
+            RatedKvar = row.Number("rated_kvar"),
+            RatedKv = row.Number("rated_kv", nominal, NominalKv),
+            TunedOrder = tuned,
+            SecondOrder = second,
+            QualityFactor = row.Find("q_factor"),
+            DampingOhm = row.Find("damping_ohm"),
+            Connection = ConnectionOf(row),
         };
     }
 
@@ -238,10 +276,16 @@ internal sealed partial class ElementBuilder
 
         return new Converter
         {
-            Name = row.Name, Location = row.Location, Bus = row.Text("bus"), RatedKw = row.Find("rated_kw"), RatedA = row.Find("rated_a"),
-            PowerFactor = row.Number("power_factor"), Spectrum = spectrum,
+            Name = row.Name,
+            Location = row.Location,
+            Bus = row.Text("bus"),
+            RatedKw = row.Find("rated_kw"),
+            RatedA = row.Find("rated_a"),
+            PowerFactor = row.Number("power_factor"),
+            Spectrum = spectrum,
             PhaseShiftDeg = row.Number("phase_shift_deg", 0, "no transformer of its own"),
-            LoadingPercent = row.Number("loading_percent", 100, "default"), Diversity = row.Number("diversity", 1, "default"),
+            LoadingPercent = row.Number("loading_percent", 100, "default"),
+            Diversity = row.Number("diversity", 1, "default"),
         };
     }
 

@@ -75,7 +75,13 @@ internal static class DistortionPicture
         {
             plot.Add.Bar(new Bar
             {
-                Position = place, Value = value, Size = size, FillColor = colour, LineColor = Look.Ink, LineWidth = 0.5f, Orientation = Orientation.Horizontal,
+                Position = place,
+                Value = value,
+                Size = size,
+                FillColor = colour,
+                LineColor = Look.Ink,
+                LineWidth = 0.5f,
+                Orientation = Orientation.Horizontal,
             });
         }
 

@@ -27,7 +27,7 @@ internal static class GainPicture
         ];
         double from = drawn[0].Orders[0];
         double to = drawn[0].Orders[^1];
-        Plot plot = Look.Empty(66, 20, 46, Axes.InjectedRoom);
+        Plot plot = Look.Empty(72, 20, 46, Axes.InjectedRoom);
         Axes.Orders(plot, from, to, labelled: true);
         double highest = drawn.Max(g => g.Gain.Max() ?? 0);
         plot.Axes.SetLimitsY(0, Math.Max(highest * 1.12, 1.2));

@@ -64,8 +64,11 @@ internal static class PositionMapPicture
         float top = 34;
         float bottom = last ? 46 : 12;
         Plot plot = Look.Empty(LeftRoom, RightRoom, bottom, top);
-        Heatmap heat = plot.Add.Heatmap(Cells(map, shown));
-        heat.Position = new CoordinateRect(from, to, -0.5, shown.Length - 0.5);
+        double[,] cells = Cells(map, shown);
+        Heatmap heat = plot.Add.Heatmap(cells);
+        // the library wants the centres of the outermost cells
+        double half = (to - from) / cells.GetLength(1) / 2;
+        heat.Position = new CoordinateRect(from + half, to - half, 0, shown.Length - 1);
         heat.Colormap = Look.Heat;
         heat.ManualRange = shades;
         heat.NaNCellColor = Colors.Gray.WithAlpha(0.25);
@@ -138,14 +141,16 @@ internal static class PositionMapPicture
     private static Panel Scale(ScottPlot.Range shades)
     {
         Plot plot = Look.Empty(LeftRoom, 260, 40, 6);
-        var ramp = new double[1, 200];
-        for (int i = 0; i < 200; i++)
+        const int steps = 200;
+        var ramp = new double[2, steps];
+        for (int i = 0; i < steps; i++)
         {
-            ramp[0, i] = shades.Min + (shades.Max - shades.Min) * i / 199;
+            ramp[0, i] = ramp[1, i] = shades.Min + (shades.Max - shades.Min) * i / (steps - 1);
         }
 
         Heatmap bar = plot.Add.Heatmap(ramp);
-        bar.Position = new CoordinateRect(shades.Min, shades.Max, 0, 1);
+        double half = (shades.Max - shades.Min) / steps / 2;
+        bar.Position = new CoordinateRect(shades.Min + half, shades.Max - half, 0.25, 0.75);
         bar.ManualRange = shades;
         bar.Colormap = Look.Heat;
         plot.Axes.SetLimits(shades.Min, shades.Max, 0, 1);

@@ -27,7 +27,7 @@ internal static class SpectrumPicture
     private static Page Draw(PictureContext context, string title, BusSpectrum spectrum)
     {
         bool several = spectrum.States.Count > 1;
-        Plot plot = Look.Empty(66, 20, 46, 10);
+        Plot plot = Look.Empty(78, 20, 46, 10);
         Color first = Look.Series[0].Colour;
         Color worst = Look.Series[1].Colour;
         double offset = several ? 0.2 : 0;
@@ -68,7 +68,12 @@ internal static class SpectrumPicture
 
         plot.Add.Bar(new Bar
         {
-            Position = position, Value = value, Size = size, FillColor = colour, LineColor = exceeded ? Look.Limit : Look.Ink, LineWidth = exceeded ? 2 : 0.5f,
+            Position = position,
+            Value = value,
+            Size = size,
+            FillColor = colour,
+            LineColor = exceeded ? Look.Limit : Look.Ink,
+            LineWidth = exceeded ? 2 : 0.5f,
         });
         ScottPlot.Plottables.Text label = plot.Add.Text(letter.Length > 0 ? $"{Figures.Percent(value)}\n{letter}" : Figures.Percent(value), position, value);
         label.LabelAlignment = Alignment.LowerCenter;

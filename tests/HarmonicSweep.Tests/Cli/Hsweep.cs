@@ -57,7 +57,7 @@ internal sealed class Hsweep
         return _study is null ? SampleResult.Of(name) : _study(request, progress, cancellation);
     };
 
-    private static IReadOnlyList<Finding> Draw(CaseFile caseFile, StudyResult result, string folder, int threads, CancellationToken cancellation)
+    private static IReadOnlyList<Finding> Draw(CaseFile caseFile, StudyRequest request, StudyResult result, string folder, CancellationToken cancellation)
     {
         File.WriteAllText(Path.Combine(folder, "sample.svg"), "<svg/>");
         return [];

@@ -51,7 +51,14 @@ public sealed class GeneratorTests
 
     private static Generator Machine(string name, double mva, double mw) => new()
     {
-        Name = name, Location = PlantKit.Here, Bus = "B", RatedMva = mva, RatedKv = 10, PMw = mw, VoltagePu = 1.01, ReactancePu = 0.2,
+        Name = name,
+        Location = PlantKit.Here,
+        Bus = "B",
+        RatedMva = mva,
+        RatedKv = 10,
+        PMw = mw,
+        VoltagePu = 1.01,
+        ReactancePu = 0.2,
     };
 
     private static Complex Kv(StateResult result, string bus) => result.Voltages.Single(v => v.Bus == bus && v.Order == 1).Kv;

@@ -189,10 +189,17 @@ internal sealed class RandomPlant
         double noLoadPercent = _draw.Between(0.2, 1.5);
         _elements.Add(new Transformer
         {
-            Name = Name("transformer"), Location = PlantKit.Here, EndA = high.Bus.Name, EndB = low.Bus.Name, RatedMva = mva,
-            HvKv = high.Bus.NominalKv * _draw.Pick(1, 1, 1.03), LvKv = low.Bus.NominalKv * _draw.Pick(1, 1, 1.05),
-            ImpedancePercent = percent, ResistancePercent = percent / Math.Sqrt(1 + xOverR * xOverR),
-            Group = new VectorGroup(windings[0], windings[1], clock), TapPercent = _draw.Pick(0, 0, -2.5, 5, 1.25),
+            Name = Name("transformer"),
+            Location = PlantKit.Here,
+            EndA = high.Bus.Name,
+            EndB = low.Bus.Name,
+            RatedMva = mva,
+            HvKv = high.Bus.NominalKv * _draw.Pick(1, 1, 1.03),
+            LvKv = low.Bus.NominalKv * _draw.Pick(1, 1, 1.05),
+            ImpedancePercent = percent,
+            ResistancePercent = percent / Math.Sqrt(1 + xOverR * xOverR),
+            Group = new VectorGroup(windings[0], windings[1], clock),
+            TapPercent = _draw.Pick(0, 0, -2.5, 5, 1.25),
             Law = _draw.Pick(ResistanceLaw.Constant, ResistanceLaw.SquareRoot, ResistanceLaw.Eddy(0.1), ResistanceLaw.Power(0.9, 0.1, 1.4)),
             NoLoadCurrentPercent = hasNoLoad ? noLoadPercent : 0,
             NoLoadLossKw = hasNoLoad && _draw.Chance(0.7) ? mva * 1000 * noLoadPercent / 100 * _draw.Between(0.1, 0.9) : 0,

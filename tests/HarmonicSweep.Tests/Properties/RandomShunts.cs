@@ -14,15 +14,23 @@ internal sealed class RandomShunts(RandomDraw draw, List<PlantElement> elements)
         double mva = draw.Between(100, 1500) * Math.Min(1, bus.NominalKv / 10);
         return PlantKit.Supply(Name("supply", elements.Count), bus.Name, mva, draw.Between(2, 25)) with
         {
-            ShortCircuitMvaMin = mva * draw.Between(0.5, 1), VoltagePu = draw.Between(0.97, 1.04), AngleDeg = draw.Between(-10, 10),
+            ShortCircuitMvaMin = mva * draw.Between(0.5, 1),
+            VoltagePu = draw.Between(0.97, 1.04),
+            AngleDeg = draw.Between(-10, 10),
             Background = draw.Chance(0.5) ? RandomSpectra.Background(draw) : null,
         };
     }
 
     public Generator Generator(Bus bus, double mva) => new()
     {
-        Name = Name("generator", elements.Count), Location = PlantKit.Here, Bus = bus.Name, RatedMva = mva, RatedKv = bus.NominalKv * draw.Pick(1, 1.05),
-        PMw = mva * draw.Between(0, 0.6), VoltagePu = draw.Between(0.98, 1.03), ReactancePu = draw.Between(0.12, 0.3),
+        Name = Name("generator", elements.Count),
+        Location = PlantKit.Here,
+        Bus = bus.Name,
+        RatedMva = mva,
+        RatedKv = bus.NominalKv * draw.Pick(1, 1.05),
+        PMw = mva * draw.Between(0, 0.6),
+        VoltagePu = draw.Between(0.98, 1.03),
+        ReactancePu = draw.Between(0.12, 0.3),
         ResistancePu = draw.Pick(0, 0.005, 0.02),
     };
 
@@ -113,9 +121,17 @@ internal sealed class RandomShunts(RandomDraw draw, List<PlantElement> elements)
         double powerFactor = draw.Between(0.75, 0.93);
         return new Motor
         {
-            Name = Name("motor", elements.Count), Location = PlantKit.Here, Bus = bus.Name, Count = count, RatedKv = bus.NominalKv * draw.Pick(1, 0.95),
-            RatedKw = mva * 1000 / count * efficiency / 100 * powerFactor, EfficiencyPercent = efficiency, PowerFactor = powerFactor,
-            LoadingPercent = draw.Pick(100, 70, 0), LockedRotorPu = draw.Between(4.5, 7.5), LockedRotorPowerFactor = draw.Between(0.1, 0.4),
+            Name = Name("motor", elements.Count),
+            Location = PlantKit.Here,
+            Bus = bus.Name,
+            Count = count,
+            RatedKv = bus.NominalKv * draw.Pick(1, 0.95),
+            RatedKw = mva * 1000 / count * efficiency / 100 * powerFactor,
+            EfficiencyPercent = efficiency,
+            PowerFactor = powerFactor,
+            LoadingPercent = draw.Pick(100, 70, 0),
+            LockedRotorPu = draw.Between(4.5, 7.5),
+            LockedRotorPowerFactor = draw.Between(0.1, 0.4),
         };
     }
 
@@ -125,8 +141,12 @@ internal sealed class RandomShunts(RandomDraw draw, List<PlantElement> elements)
         double detuning = draw.Chance(0.5) ? draw.Pick(5.67, 7, 14) : 0;
         return PlantKit.Bank(Name("bank", elements.Count), bus.Name, mvar * 1000, bus.NominalKv * draw.Pick(1, 1.1, 1.2)) with
         {
-            Steps = steps, StepsIn = draw.Integer(0, steps), DetuningPercent = detuning, ReactorQ = detuning > 0 ? draw.Between(20, 80) : null,
-            LossWPerKvar = draw.Pick(0, 0.2, 2), Connection = draw.Pick(Connection.Delta, Connection.Wye, Connection.WyeGrounded),
+            Steps = steps,
+            StepsIn = draw.Integer(0, steps),
+            DetuningPercent = detuning,
+            ReactorQ = detuning > 0 ? draw.Between(20, 80) : null,
+            LossWPerKvar = draw.Pick(0, 0.2, 2),
+            Connection = draw.Pick(Connection.Delta, Connection.Wye, Connection.WyeGrounded),
         };
     }
 
@@ -156,7 +176,9 @@ internal sealed class RandomShunts(RandomDraw draw, List<PlantElement> elements)
         {
             RatedKw = amperes ? null : mva * 1000 * powerFactor,
             RatedA = amperes ? mva * 1000 / (Math.Sqrt(3) * bus.NominalKv) : null,
-            PhaseShiftDeg = draw.Pick(0, 0, 30, -15, 7.5), LoadingPercent = draw.Pick(100, 100, 60), Diversity = draw.Pick(1, 1, 0.8),
+            PhaseShiftDeg = draw.Pick(0, 0, 30, -15, 7.5),
+            LoadingPercent = draw.Pick(100, 100, 60),
+            Diversity = draw.Pick(1, 1, 0.8),
         };
     }
 }

@@ -145,9 +145,17 @@ internal sealed record SampleStudies
                 Resonance? nearest = Injects ? parallel.MinBy(r => r.Distance) : null;
                 positions.Add(new BankPosition
                 {
-                    BaseState = "base", State = FormattableString.Invariant($"base, supply {strength}, BANK-1 {steps}/{BankSteps}"), Bank = "BANK-1", Bus = BusName(0),
-                    StepsIn = steps, Steps = BankSteps, Strength = strength, KvarIn = 50 * steps,
-                    ParallelResonances = parallel, Nearest = nearest, DoNotDwell = nearest?.Distance < 0.3,
+                    BaseState = "base",
+                    State = FormattableString.Invariant($"base, supply {strength}, BANK-1 {steps}/{BankSteps}"),
+                    Bank = "BANK-1",
+                    Bus = BusName(0),
+                    StepsIn = steps,
+                    Steps = BankSteps,
+                    Strength = strength,
+                    KvarIn = 50 * steps,
+                    ParallelResonances = parallel,
+                    Nearest = nearest,
+                    DoNotDwell = nearest?.Distance < 0.3,
                 });
             }
 

@@ -12,15 +12,28 @@ internal static class PlantKit
 
     public static Bus Bus(string name, double kv) => new(name, kv, Here);
 
+    /// <summary>
+    /// 
+    /// </summary>
     /// <param name="mva">Maximum = minimum short-circuit power, MVA.</param>
     public static Supply Supply(string name, string bus, double mva, double xOverR = 10) => new()
     {
-        Name = name, Location = Here, Bus = bus, ShortCircuitMvaMax = mva, ShortCircuitMvaMin = mva, XOverR = xOverR,
+        Name = name,
+        Location = Here,
+        Bus = bus,
+        ShortCircuitMvaMax = mva,
+        ShortCircuitMvaMin = mva,
+        XOverR = xOverR,
     };
 
     public static CapacitorBank Bank(string name, string bus, double kvar, double kv) => new()
     {
-        Name = name, Location = Here, Bus = bus, RatedKvar = kvar, RatedKv = kv, StepsIn = 1,
+        Name = name,
+        Location = Here,
+        Bus = bus,
+        RatedKvar = kvar,
+        RatedKv = kv,
+        StepsIn = 1,
     };
 
     public static Transformer Transformer(
@@ -33,35 +46,72 @@ internal static class PlantKit
 
         return new()
         {
-            Name = name, Location = Here, EndA = hv, EndB = lv, RatedMva = mva, HvKv = hvKv, LvKv = lvKv,
-            ImpedancePercent = impedancePercent, ResistancePercent = impedancePercent / Math.Sqrt(1 + xOverR * xOverR), Group = parsed,
+            Name = name,
+            Location = Here,
+            EndA = hv,
+            EndB = lv,
+            RatedMva = mva,
+            HvKv = hvKv,
+            LvKv = lvKv,
+            ImpedancePercent = impedancePercent,
+            ResistancePercent = impedancePercent / Math.Sqrt(1 + xOverR * xOverR),
+            Group = parsed,
         };
     }
 
     public static Line Line(string name, string a, string b, double km, double r, double x, double nanofarad, ResistanceLaw? law = null) => new()
     {
-        Name = name, Location = Here, EndA = a, EndB = b, IsCable = true, LengthKm = km, ResistanceOhmPerKm = r,
-        ReactanceOhmPerKm = x, CapacitanceNanofaradPerKm = nanofarad, Law = law ?? ResistanceLaw.Constant,
+        Name = name,
+        Location = Here,
+        EndA = a,
+        EndB = b,
+        IsCable = true,
+        LengthKm = km,
+        ResistanceOhmPerKm = r,
+        ReactanceOhmPerKm = x,
+        CapacitanceNanofaradPerKm = nanofarad,
+        Law = law ?? ResistanceLaw.Constant,
     };
 
     public static SeriesReactor Reactor(string name, string a, string b, double ohm, double quality) => new()
     {
-        Name = name, Location = Here, EndA = a, EndB = b, ReactanceOhm = ohm, QualityFactor = quality,
+        Name = name,
+        Location = Here,
+        EndA = a,
+        EndB = b,
+        ReactanceOhm = ohm,
+        QualityFactor = quality,
     };
 
     public static LinearLoad Load(string name, string bus, double kw, double kvar, LoadModel model = LoadModel.Parallel) => new()
     {
-        Name = name, Location = Here, Bus = bus, PKw = kw, QKvar = kvar, Model = model,
+        Name = name,
+        Location = Here,
+        Bus = bus,
+        PKw = kw,
+        QKvar = kvar,
+        Model = model,
     };
 
     public static Filter Filter(string name, string bus, FilterKind kind, double kvar, double kv, double tuned, double? quality) => new()
     {
-        Name = name, Location = Here, Bus = bus, Kind = kind, RatedKvar = kvar, RatedKv = kv, TunedOrder = tuned, QualityFactor = quality,
+        Name = name,
+        Location = Here,
+        Bus = bus,
+        Kind = kind,
+        RatedKvar = kvar,
+        RatedKv = kv,
+        TunedOrder = tuned,
+        QualityFactor = quality,
     };
 
     public static Coupler Coupler(string name, string a, string b, bool closed = true) => new()
     {
-        Name = name, Location = Here, EndA = a, EndB = b, Closed = closed,
+        Name = name,
+        Location = Here,
+        EndA = a,
+        EndB = b,
+        Closed = closed,
     };
 
     public static Spectrum Spectrum(string name, params IEnumerable<(double Order, double Percent, double AngleDeg)> lines) =>
@@ -69,6 +119,11 @@ internal static class PlantKit
 
     public static Converter Converter(string name, string bus, double kw, double powerFactor, Spectrum spectrum) => new()
     {
-        Name = name, Location = Here, Bus = bus, RatedKw = kw, PowerFactor = powerFactor, Spectrum = spectrum,
+        Name = name,
+        Location = Here,
+        Bus = bus,
+        RatedKw = kw,
+        PowerFactor = powerFactor,
+        Spectrum = spectrum,
     };
 }

@@ -39,6 +39,9 @@ internal static class TwinBranches
         return new[,] { { y, -y }, { -y, y } };
     }
 
+    /// <summary>
+    /// 
+    /// </summary>
     /// <param name="sequence">+1 positive, -1 negative sequence.</param>
     public static Complex[,] Transformer(PlantInState state, Transformer transformer, double h, int sequence)
     {

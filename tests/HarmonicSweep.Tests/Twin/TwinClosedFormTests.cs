@@ -59,8 +59,16 @@ public sealed class TwinClosedFormTests
         // 4 x 180 kW at 0.9 x 0.8: 1 MVA; 0.4^2/1/5 = 0.032 ohm at pf 0.6: R 0.0192, X 0.0256
         Motor motor = new()
         {
-            Name = "M", Location = PlantKit.Here, Bus = "B", RatedKw = 180, Count = 4, RatedKv = 0.4, EfficiencyPercent = 90,
-            PowerFactor = 0.8, LockedRotorPu = 5, LockedRotorPowerFactor = 0.6,
+            Name = "M",
+            Location = PlantKit.Here,
+            Bus = "B",
+            RatedKw = 180,
+            Count = 4,
+            RatedKv = 0.4,
+            EfficiencyPercent = 90,
+            PowerFactor = 0.8,
+            LockedRotorPu = 5,
+            LockedRotorPowerFactor = 0.6,
         };
         Plant plant = PlantKit.Plant(50, [PlantKit.Bus("B", 0.4)], motor);
         Near(new Complex(0.0192 * 3, 0.0256 * 9), new DenseTwin(plant).Impedance("B", "B", 9));

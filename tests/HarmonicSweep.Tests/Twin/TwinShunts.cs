@@ -80,29 +80,29 @@ internal static class TwinShunts
         switch (filter.Kind)
         {
             case FilterKind.SingleTuned:
-            {
-                double xl = xc / (tuned * tuned);
-                return 1 / (xc / (tuned * filter.QualityFactor!.Value) + J * (h * xl - xc / h));
-            }
+                {
+                    double xl = xc / (tuned * tuned);
+                    return 1 / (xc / (tuned * filter.QualityFactor!.Value) + J * (h * xl - xc / h));
+                }
 
             case FilterKind.HighPass2:
-            {
-                double xl = xc / (tuned * tuned);
-                return 1 / (capacitor + 1 / (1 / Damping() + 1 / (J * h * xl)));
-            }
+                {
+                    double xl = xc / (tuned * tuned);
+                    return 1 / (capacitor + 1 / (1 / Damping() + 1 / (J * h * xl)));
+                }
 
             case FilterKind.HighPass3:
-            {
-                double xl = xc / (tuned * tuned);
-                return 1 / (capacitor + 1 / (1 / (J * h * xl) + 1 / (Damping() - J * xc / h)));
-            }
+                {
+                    double xl = xc / (tuned * tuned);
+                    return 1 / (capacitor + 1 / (1 / (J * h * xl) + 1 / (Damping() - J * xc / h)));
+                }
 
             case FilterKind.CType:
-            {
-                double xl = xc / (tuned * tuned - 1);
-                Complex arm = J * xl * (h - 1 / h);
-                return 1 / (capacitor + arm * Damping() / (arm + Damping()));
-            }
+                {
+                    double xl = xc / (tuned * tuned - 1);
+                    Complex arm = J * xl * (h - 1 / h);
+                    return 1 / (capacitor + arm * Damping() / (arm + Damping()));
+                }
 
             default:
                 return 1 / DoubleTuned(filter, xc, h);
@@ -118,17 +118,17 @@ internal static class TwinShunts
             case LinearLoad load:
                 return 1000 * scale * new Complex(load.PKw, load.QKvar);
             case Motor motor:
-            {
-                double s = motor.Count * motor.RatedKw / (motor.EfficiencyPercent / 100 * motor.PowerFactor);
-                return 1000 * scale * AtPowerFactor(s, motor.PowerFactor);
-            }
+                {
+                    double s = motor.Count * motor.RatedKw / (motor.EfficiencyPercent / 100 * motor.PowerFactor);
+                    return 1000 * scale * AtPowerFactor(s, motor.PowerFactor);
+                }
 
             case Converter converter:
-            {
-                double kv = state.Plant.Bus(converter.Bus).NominalKv;
-                double s = converter.RatedKw is { } kw ? kw / converter.PowerFactor : Math.Sqrt(3) * kv * converter.RatedA!.Value;
-                return 1000 * scale * AtPowerFactor(s, converter.PowerFactor);
-            }
+                {
+                    double kv = state.Plant.Bus(converter.Bus).NominalKv;
+                    double s = converter.RatedKw is { } kw ? kw / converter.PowerFactor : Math.Sqrt(3) * kv * converter.RatedA!.Value;
+                    return 1000 * scale * AtPowerFactor(s, converter.PowerFactor);
+                }
 
             default:
                 throw new ArgumentException($"{element.Name} draws no constant power.", nameof(element));
@@ -158,18 +158,18 @@ internal static class TwinShunts
             case LoadModel.Growing:
                 return (0.1 * h + 0.9) * parallel;
             case LoadModel.Series:
-            {
-                Complex atFundamental = v2 / new Complex(p, -q);
-                return 1 / new Complex(atFundamental.Real, atFundamental.Imaginary * reactanceGrowth);
-            }
+                {
+                    Complex atFundamental = v2 / new Complex(p, -q);
+                    return 1 / new Complex(atFundamental.Real, atFundamental.Imaginary * reactanceGrowth);
+                }
 
             case LoadModel.Cigre:
-            {
-                double r = v2 / p;
-                double xs = 0.073 * r;
-                double xp = r / (6.7 * q / p - 0.74);
-                return 1 / (r + J * h * xs) + 1 / (J * h * xp);
-            }
+                {
+                    double r = v2 / p;
+                    double xs = 0.073 * r;
+                    double xp = r / (6.7 * q / p - 0.74);
+                    return 1 / (r + J * h * xs) + 1 / (J * h * xp);
+                }
 
             default:
                 throw new ArgumentOutOfRangeException(nameof(model));
