@@ -58,6 +58,9 @@ internal sealed record Column
     /// <summary>Whether its model comes with a later version: a cell that is not blank is refused.</summary>
     public bool Later { get; init; }
 
+    /// <summary>Whether its cells name something, so that they may hold visible characters only.</summary>
+    public bool IsName => Kind is CellKind.Name or CellKind.Bus || (Kind == CellKind.Text && Required);
+
     /// <summary>What is expected, for messages: <c>a number above 0 in km</c>.</summary>
     public string Expected => Kind switch
     {
