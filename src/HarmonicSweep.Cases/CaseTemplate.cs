@@ -74,7 +74,7 @@ public static class CaseTemplate
         foreach (Column column in table.Columns.Where(c => !c.Later))
         {
             string mark = column.Required ? "*" : " ";
-            string comment = column.Comment.Length > 0 ? "; " + column.Comment : "";
+            string comment = column.Comment.Length > 0 && column.Comment != column.Expected ? "; " + column.Comment : "";
             text.Append("# ").Append(mark).Append(' ').Append(column.Name).Append(": ").Append(column.Expected).Append(comment).Append('\n');
         }
 

@@ -58,7 +58,7 @@ internal sealed class CaseToml
         if (document.HasErrors)
         {
             string[] lines = text.Split('\n');
-            foreach (int line in document.Diagnostics.Select(d => d.Span.Start.Line).Where(l => l < lines.Length && lines[l].Trim().Length > 0).DefaultIfEmpty(lines.Length - 1).Distinct())
+            foreach (int line in FaultyLines(lines, document))
             {
                 (string message, string remedy) = TomlSlip.Explain(lines[line]);
                 findings.Error(Ids.TomlSyntax, new SourceLocation(File, line + 1), message, remedy);
@@ -92,6 +92,18 @@ internal sealed class CaseToml
         return toml;
     }
 
+    /// <summary>
+    /// Lines to blame. One slip makes the parser stumble over sound lines after it, and one that leaves a bracket open is noticed
+    /// in the next line only; so a line is blamed when it is wrong on its own.
+    /// </summary>
+    private static List<int> FaultyLines(string[] lines, DocumentSyntax document)
+    {
+        List<int> noticed = [.. document.Diagnostics.Select(d => Math.Min(d.Span.Start.Line, lines.Length - 1)).Distinct().Order()];
+        List<int> candidates = [.. Enumerable.Range(0, noticed[0]).Where(l => lines[l].Trim().Length > 0).TakeLast(1), .. noticed];
+        List<int> faulty = [.. candidates.Where(l => SyntaxParser.Parse(lines[l], File, false).HasErrors)];
+        return faulty.Count > 0 ? faulty : [noticed[0]];
+    }
+
     private static string Join(KeySyntax? key) => key?.ToString().Trim().Trim('"') ?? "";
 
     private void Collect(string table, SyntaxList<KeyValueSyntax> pairs)
@@ -106,7 +118,7 @@ internal sealed class CaseToml
             if (!_keys.TryGetValue(owner, out string[]? known) || !known.Contains(name))
             {
                 string[] candidates = known ?? [.. _keys.SelectMany(k => k.Value)];
-                string remedy = _keys.ContainsKey(name) ? $"write [{name}] on a line of its own, and its keys under it." : NearestName.Suggest(name, candidates, Elsewhere(name));
+                string remedy = _keys.ContainsKey(name) ? $"write [{name}] on a line of its own, and its keys under it." : NearestName.Of(name, candidates) is null ? Elsewhere(name) : NearestName.Suggest(name, candidates, "remove it.");
                 _findings.Error(
                     Ids.UnknownKey, new SourceLocation(File, line, key.Shown()), $"unknown key '{key.Shown()}'{(owner.Length > 0 && table.Length > 0 ? $" in [{owner}]" : "")}; known are {string.Join(", ", candidates)}.",
                     remedy);
@@ -124,9 +136,13 @@ internal sealed class CaseToml
         }
     }
 
-    private static string Elsewhere(string name) => _keys.FirstOrDefault(k => k.Value.Contains(name)) is { Value: not null } home
-        ? $"move it under {(home.Key.Length == 0 ? "the top of the file, before the first [table]" : $"[{home.Key}]")}."
-        : "remove it.";
+    private static string Elsewhere(string name)
+    {
+        string? meant = NearestName.Of(name, _keys.SelectMany(k => k.Value));
+        string home = _keys.FirstOrDefault(k => k.Value.Contains(meant)).Key ?? "";
+        string place = home.Length == 0 ? "to the top of the file, before the first [table]" : $"under [{home}]";
+        return meant is null ? "remove it." : meant == name ? $"move it {place}." : $"write {meant}, if that is meant, and move it {place}.";
+    }
 
     private static object? ValueOf(ValueSyntax? value) => value switch
     {
@@ -203,7 +219,9 @@ internal sealed class CaseToml
         }
         else if ((to - from) / step > 1_000_000)
         {
-            Error(Ids.KeyRange, "sweep.step_hz", "the range has more than 1,000,000 points.", "give a larger step_hz; resonances are found between the points all the same.");
+            Error(
+                Ids.KeyRange, "sweep.step_hz",
+                $"from_hz {Schema.PlainNumber.Plain(from)} to to_hz {Schema.PlainNumber.Plain(to)} in steps of {Schema.PlainNumber.Plain(step)} Hz is more than 1000000 points; expected fewer.", "give a larger step_hz; resonances are found between the points all the same.");
         }
 
         return new SweepRange(from, to, step);
@@ -240,7 +258,7 @@ internal sealed class CaseToml
         string[]? names = given.Value as string[] ?? (given.Value is string one ? [one] : null);
         if (names is null)
         {
-            Error(Ids.KeyType, "limits.standards", "standards is not a list of texts.", $"write standards = [\"{Ieee519.Edition}\"].");
+            Error(Ids.KeyType, "limits.standards", "standards is not a list of texts; expected the names of limit sets.", $"write standards = [\"{Ieee519.Edition}\"].");
             return [];
         }
 
@@ -286,7 +304,8 @@ internal sealed class CaseToml
 
         if (value.Value is not double number)
         {
-            Error(Ids.KeyType, key, $"{Bare(key)} is not a number; expected a number above 0 in {unit}.", "write digits without quotes.");
+            Error(
+                Ids.KeyType, key, $"{Bare(key)} is {(value.Value is string ? "a text" : "not a number")}; expected a number above 0 in {unit}.", "write digits without quotes.");
             return null;
         }
 

@@ -72,10 +72,11 @@ internal sealed class CsvFile
             }
         }
 
+        int lines = 1 + text.AsSpan().TrimEnd().Count('\n');
         int lastRecord = records.Count > 0 ? records[^1].Line : 0;
         foreach (int line in malformed)
         {
-            string lost = line > lastRecord && line == malformed[^1] ? "; what follows it in the file was not read" : "";
+            string lost = line > lastRecord && line == malformed[^1] && lines > line ? "; what follows it in the file was not read" : "";
             findings.Error(
                 Ids.Malformed, new SourceLocation(file, line),
                 $"a quotation mark stands inside a cell or has no partner{lost}; expected a pair of quotes around the whole cell.",

@@ -116,7 +116,7 @@ internal sealed partial class ElementBuilder
         double lv = RatedKv(row, "lv_kv", "lv_side");
         if (hv < lv)
         {
-            row.Warning(Ids.Sides, "hv_side", $"{row.Name}: its high-voltage side has {hv.Plain()} kV and its low-voltage side {lv.Plain()} kV.", "exchange hv_side and lv_side.");
+            row.Warning(Ids.Sides, "hv_side", $"{row.Name}: its high-voltage side has {hv.Plain()} kV and its low-voltage side {lv.Plain()} kV.", "exchange hv_side and lv_side, and their rated voltages.");
         }
 
         double rated = row.Number("rated_mva");

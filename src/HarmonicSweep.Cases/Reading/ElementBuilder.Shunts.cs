@@ -25,7 +25,7 @@ internal sealed partial class ElementBuilder
         }
         else if (least > maximum)
         {
-            row.Error(Ids.Rule, row.Has("sc_ka_min") ? "sc_ka_min" : "sc_mva_min", $"{row.Name}: the smallest short-circuit power, {least.Value.Plain()} MVA, exceeds the largest, {maximum.Plain()} MVA.", "exchange them.");
+            row.Error(Ids.Rule, row.Has("sc_ka_min") ? "sc_ka_min" : "sc_mva_min", $"{row.Name}: the smallest short-circuit power, {least.Value.Short()} MVA, exceeds the largest, {maximum.Short()} MVA.", "exchange them.");
         }
 
         row.Assume("resistance_law", "constant", "the resistance of a supply is held constant");
@@ -79,7 +79,7 @@ internal sealed partial class ElementBuilder
         if (grounding is not ("" or "open"))
         {
             row.Error(
-                Ids.LaterModel, "grounding", $"{row.Name}: grounding is '{row.Text("grounding")}', but its model is not in this version.",
+                Ids.LaterModel, "grounding", $"{row.Name}: grounding is '{row.Text("grounding")}', but its model is not in this version; expected open or a blank cell.",
                 "leave the cell blank or write open; positive and negative sequence do not depend on it.");
         }
 
@@ -126,7 +126,7 @@ internal sealed partial class ElementBuilder
         if (model == LoadModel.Cigre && (active <= 0 || reactive <= 0.74 / 6.7 * active))
         {
             row.Error(
-                Ids.Rule, "model", $"{row.Name}: the model cigre needs P above 0 and Q/P above 0.1104 (0.74/6.7); P is {active.Plain()} kW, Q is {reactive.Plain()} kvar.",
+                Ids.Rule, "model", $"{row.Name}: the model cigre needs P above 0 and Q/P above 0.1104 (0.74/6.7); P is {active.Plain()} kW, Q is {reactive.Short()} kvar.",
                 "use the model parallel, or check the power factor.");
         }
 
@@ -233,7 +233,7 @@ internal sealed partial class ElementBuilder
 
         if (kind == FilterKind.SingleTuned && row.Has("damping_ohm"))
         {
-            row.Error(Ids.Rule, "damping_ohm", $"{row.Name}: a single_tuned filter has no damping resistor.", "leave damping_ohm blank, or choose a damped kind.");
+            row.Error(Ids.Rule, "damping_ohm", $"{row.Name}: a single_tuned filter has no damping resistor; expected a blank cell.", "leave damping_ohm blank, or choose a damped kind.");
         }
 
         if (!hasCoilResistance && row.Has("q_factor") && row.Has("damping_ohm"))
@@ -251,7 +251,8 @@ internal sealed partial class ElementBuilder
         {
             row.Error(
                 Ids.Rule, "second_order",
-                kind == FilterKind.DoubleTuned ? $"{row.Name}: a double_tuned filter needs second_order above tuned_order." : $"{row.Name}: second_order is for double_tuned filters only.",
+                kind == FilterKind.DoubleTuned ? $"{row.Name}: second_order is {(second is { } order ? order.Plain() : "blank")}; expected a number above its tuned_order, {tuned.Plain()}, for a double_tuned filter."
+                    : $"{row.Name}: second_order is for double_tuned filters only; expected a blank cell.",
                 kind == FilterKind.DoubleTuned ? "give the upper of its two orders." : "leave it blank.");
         }
 

@@ -7,8 +7,8 @@ public static class NearestName
     private const int Longest = 100;
 
     /// <summary>
-    /// The candidate at the smallest edit distance (Levenshtein 1966), letter case left out; null when none is within a third of
-    /// the length.
+    /// The candidate at the smallest edit distance (Levenshtein 1966), letter case left out; else one that begins with
+    /// the word; null when none is within a third of the length either.
     /// </summary>
     public static string? Of(string word, IEnumerable<string> candidates)
     {
@@ -30,7 +30,8 @@ public static class NearestName
             }
         }
 
-        return best;
+        // or a word left unfinished: efficiency for efficiency_percent
+        return best ?? (lower.Length < 3 ? null : candidates.FirstOrDefault(c => c.StartsWith(lower, StringComparison.OrdinalIgnoreCase)));
     }
 
     /// <summary>A remedy that begins with the suggestion, when there is one.</summary>

@@ -7,7 +7,7 @@ namespace HarmonicSweep.Cases.Reading;
 internal static class NumberSize
 {
     /// <summary>The bound, for messages.</summary>
-    public const string Words = "1e-12 to 1e12";
+    public const string Words = "from 1e-12 to 1e12";
 
     /// <summary>Whether the number is 0 or of such a size.</summary>
     public static bool Fits(double value) => value == 0 || Math.Abs(value) is >= 1e-12 and <= 1e12;

@@ -88,7 +88,7 @@ internal static class Plausibility
     {
         if (mva is < 1 or > 200_000)
         {
-            row.Warning(Ids.ShortCircuit, row.Has("sc_ka_max") ? "sc_ka_max" : "sc_mva_max", $"{row.Name}: a short-circuit power of {mva.ToString("G5", System.Globalization.CultureInfo.InvariantCulture)} MVA is outside the usual 1 to 200000.", "check that it is MVA (or kA) and not kVA, A or ohm.");
+            row.Warning(Ids.ShortCircuit, row.Has("sc_ka_max") ? "sc_ka_max" : "sc_mva_max", $"{row.Name}: a short-circuit power of {mva.Short()} MVA is outside the usual 1 to 200000.", "check that it is MVA (or kA) and not kVA, A or ohm.");
         }
     }
 
@@ -121,7 +121,7 @@ internal static class Plausibility
         }
 
         double delivered = ratedKvar * Math.Pow(nominalKv / ratedKv, 2) / (1 - detuningPercent / 100);
-        string kvar = delivered.ToString("G5", System.Globalization.CultureInfo.InvariantCulture);
+        string kvar = delivered.Short();
         row.Warning(
             Ids.BankVoltage, "rated_kv", $"{row.Name}: {ratedKvar.Plain()} kvar at {ratedKv.Plain()} kV delivers {kvar} kvar at the bus's {nominalKv.Plain()} kV.",
             "nothing needs mending if rated_kvar is that at rated_kv; else convert it.");
@@ -135,7 +135,7 @@ internal static class Plausibility
         }
 
         double kvar = row.Number("rated_kvar");
-        string atNominal = (kvar * Math.Pow(nominalKv / ratedKv, 2)).ToString("G5", System.Globalization.CultureInfo.InvariantCulture);
+        string atNominal = (kvar * Math.Pow(nominalKv / ratedKv, 2)).Short();
         row.Warning(
             Ids.BankVoltage, "rated_kv", $"{row.Name}: {kvar.Plain()} kvar of capacitors at {ratedKv.Plain()} kV are {atNominal} kvar at the bus's {nominalKv.Plain()} kV.",
             "nothing needs mending if rated_kvar is that of the capacitors at rated_kv; else convert it.");

@@ -201,7 +201,7 @@ internal sealed class TableReader(FindingList findings, List<AssumedValue> assum
         bool size = !NumberSize.Fits(value) || NumberSize.Vanished(cell, value);
         if (low || value > column.Most || fraction || size)
         {
-            string sized = size && !low && value <= column.Most ? $" (0, or {NumberSize.Words} in size)" : "";
+            string sized = size && !low && value <= column.Most ? $" ({NumberSize.Words} in size)" : "";
             row.Error(
                 Ids.OutOfRange, column.Name, $"{called}{column.Name} is {cell.Shown()}; expected {column.Expected}{sized}.", RangeRemedy(column, value));
             return;
@@ -213,7 +213,7 @@ internal sealed class TableReader(FindingList findings, List<AssumedValue> assum
 
     private static string RangeRemedy(Column column, double value) => (column.Most, column.Unit) switch
     {
-        (1, "") when value is > 1 and <= 100 => $"write {(value / 100).Plain()} if {value.Plain()} percent is meant.",
+        (1, "") when value is >= 5 and <= 100 => $"write {(value / 100).Plain()} if {value.Plain()} percent is meant.",
         _ when value < 0 && column.Least >= 0 => "remove the minus sign, or check which column the value belongs to.",
         (_, "") => "correct the value, or check which column it belongs to.",
         _ => "correct the value, or check its unit.",

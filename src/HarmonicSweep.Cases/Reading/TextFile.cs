@@ -27,7 +27,7 @@ internal static class TextFile
             }
 
             findings.Error(
-                Ids.Encoding, new SourceLocation(file, 1 + text.AsSpan(0, text.IndexOf('\0')).Count('\n')), "the file holds zero characters; expected UTF-8 text.",
+                Ids.Encoding, new SourceLocation(file, 1 + text.AsSpan(0, text.IndexOf('\0')).Count('\n')), "the file holds zero characters, as UTF-16 without a byte-order mark does; expected UTF-8 text.",
                 "save it as 'CSV UTF-8', or as UTF-16 with a byte-order mark.");
             return null;
         }

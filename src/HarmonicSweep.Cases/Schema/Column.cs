@@ -69,7 +69,7 @@ internal sealed record Column
         CellKind.Word => "one of " + string.Join(", ", Words),
         CellKind.Bus => "the name of a bus of buses.csv",
         CellKind.Name => "a name that nothing else bears",
-        _ => "a text",
+        _ => Required ? Comment : "a text",
     };
 
     private string Range => (double.IsFinite(Least), double.IsFinite(Most)) switch
@@ -142,4 +142,8 @@ internal static class PlainNumber
 {
     /// <summary>Shortest text that reads back as the same number, invariant culture.</summary>
     public static string Plain(this double value) => value.ToString(System.Globalization.CultureInfo.InvariantCulture);
+
+    /// <summary>A computed number, rounded for reading.</summary>
+    public static string Short(this double value) => value.ToString(
+        Math.Abs(value) switch { >= 1000 => "0", >= 1 => "0.##", _ => "G4" }, System.Globalization.CultureInfo.InvariantCulture);
 }

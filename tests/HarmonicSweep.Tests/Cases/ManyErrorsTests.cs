@@ -7,8 +7,7 @@ public class ManyErrorsTests
 {
     private static readonly BrokenPlants Plants = new()
     {
-        {
-            "ten errors and more over many files",
+        { "ten errors and more over many files",
             p => p.Replace("case.toml", "step_hz = 1", "step_hz = -1")
                 .Replace("buses.csv", "MAIN-B,11", "MAIN-B,11 kV")
                 .Replace("cables.csv", "1.2", "-1.2")
@@ -21,8 +20,7 @@ public class ManyErrorsTests
                 .Append("states.csv", "base,GRID,out")
                 .Replace("supplies.csv", "500,,300,,", "500,9,300,,")
                 .Replace("transformers.csv", "15,,Dyn11", "15,,Dyn10")
-                .With("bus.csv", "bus\n")
-        },
+                .With("bus.csv", "bus\n") },
     };
 
     public static TheoryData<string> Names => Plants.Names;

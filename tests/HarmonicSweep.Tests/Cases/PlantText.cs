@@ -133,11 +133,15 @@ internal sealed class PlantText
     public PlantText Append(string file, string line) => With(file, this[file] + "\n" + line);
 
     /// <summary>Reads the plant from a folder on disk, which is removed afterwards.</summary>
-    public CaseReadResult Read()
+    public CaseReadResult Read() => Read(out _);
+
+    /// <summary>Reads the plant from a folder on disk, which is removed afterwards.</summary>
+    public CaseReadResult Read(out string path)
     {
         using var folder = new TempFolder();
-        WriteTo(folder.Path);
-        return CaseReader.Read(folder.Path);
+        path = folder.Path;
+        WriteTo(path);
+        return CaseReader.Read(path);
     }
 
     /// <summary>Reads a plant that must be sound.</summary>
