@@ -41,13 +41,7 @@ internal sealed class FindingList
     private void Add(Severity severity, string id, SourceLocation? location, string message, string remedy) => _findings.Add(
         new Finding(severity, id, location?.Column is { } column ? location.At(OneLine(column)) : location, OneLine(message), OneLine(remedy)));
 
-    private static string OneLine(string text) => text.AsSpan().IndexOfAnyInRange('\0', '\x1F') < 0
-        ? text
-        : string.Create(text.Length, text, static (span, from) =>
-        {
-            for (int i = 0; i < span.Length; i++)
-            {
-                span[i] = char.IsControl(from[i]) ? ' ' : from[i];
-            }
-        });
+    private static string OneLine(string text) => text.Any(Breaks) ? new string([.. text.Select(c => Breaks(c) ? ' ' : c)]) : text;
+
+    private static bool Breaks(char c) => char.IsControl(c) || c is '\u2028' or '\u2029';
 }
