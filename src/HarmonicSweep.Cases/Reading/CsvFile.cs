@@ -121,9 +121,9 @@ internal sealed class CsvFile
             cells[i] = reader.GetString(i).Trim();
         }
 
-        // a spreadsheet puts quotes round a comment line that has the separator in it
-        bool comment = cells.Length > 0 && cells[0].StartsWith("# ", StringComparison.Ordinal);
-        if (!comment && cells.AsSpan().IndexOfAnyExcept("") >= 0)
+        // a spreadsheet puts quotes round a comment line that has the separator in it, and fills the line up with separators
+        bool alone = cells.AsSpan(Math.Min(1, cells.Length)).IndexOfAnyExcept("") < 0;
+        if (!alone || (cells is [{ Length: > 0 } first, ..] && first[0] != '#'))
         {
             records.Add(new CsvRecord((int)reader.LineNumber, cells));
         }

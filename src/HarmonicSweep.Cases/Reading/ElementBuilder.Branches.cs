@@ -47,13 +47,7 @@ internal sealed partial class ElementBuilder
             return null;
         }
 
-        double a = NominalOf(row, "end_a");
-        double b = NominalOf(row, "end_b");
-        if (Math.Max(a, b) > 1.2 * Math.Min(a, b))
-        {
-            row.Warning(Ids.Sides, "end_b", $"{row.Name}: it runs from {a.Plain()} kV to {b.Plain()} kV.", "check its ends: a line joins buses of one voltage.");
-        }
-
+        Plausibility.Ends(row, NominalOf(row, "end_a"), NominalOf(row, "end_b"));
         Plausibility.Length(row, isCable);
         ResistanceLaw? law = ResistanceLawCell.Read(row, isCable ? "cable" : "line", () => BesselOf(row, resistance));
         return law is null ? null : new Line
@@ -93,6 +87,7 @@ internal sealed partial class ElementBuilder
             return null;
         }
 
+        Plausibility.Ends(row, NominalOf(row, "end_a"), NominalOf(row, "end_b"));
         return new SeriesReactor
         {
             Name = row.Name,

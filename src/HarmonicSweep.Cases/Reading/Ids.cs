@@ -41,7 +41,6 @@ internal static class Ids
     public const string UnknownStandard = "HS038";
     public const string NoBuses = "HS039";
     public const string NoSource = "HS040";
-    public const string NoTables = "HS041";
     public const string RepeatedOrder = "HS042";
     public const string FolderInUse = "HS043";
     public const string NameCharacters = "HS044";

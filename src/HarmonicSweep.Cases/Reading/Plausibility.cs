@@ -73,6 +73,16 @@ internal static class Plausibility
         }
     }
 
+    public static void Ends(Row row, double firstKv, double secondKv)
+    {
+        if (Math.Max(firstKv, secondKv) > (1 + RatedShare) * Math.Min(firstKv, secondKv))
+        {
+            row.Warning(
+                Ids.Sides, "end_b", $"{row.Name}: it runs from {firstKv.Plain()} kV to {secondKv.Plain()} kV; expected buses of one voltage.",
+                "check its ends, or put a transformer between them.");
+        }
+    }
+
     public static void Length(Row row, bool isCable)
     {
         double length = row.Number("length_km");

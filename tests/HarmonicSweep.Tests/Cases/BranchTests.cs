@@ -107,7 +107,10 @@ public class BranchTests
             "lines.csv(2,length_km): warning HS107: L1: 8000 km is long for a line; it looks like metres. Fix: write 8 if 8000 m is meant."
         },
         { "doubt: line between voltages", p => p.Replace("lines.csv", "L1,MAIN,MAIN-B", "L1,MAIN,LV"),
-            "lines.csv(2,end_b): warning HS103: L1: it runs from 11 kV to 0.4 kV. Fix: check its ends: a line joins buses of one voltage."
+            "lines.csv(2,end_b): warning HS103: L1: it runs from 11 kV to 0.4 kV; expected buses of one voltage. Fix: check its ends, or put a transformer between them."
+        },
+        { "doubt: reactor between voltages", p => p.Replace("reactors.csv", "R1,MAIN,MAIN-B", "R1,MAIN,LV"),
+            "reactors.csv(2,end_b): warning HS103: R1: it runs from 11 kV to 0.4 kV; expected buses of one voltage. Fix: check its ends, or put a transformer between them."
         },
         { "doubt: volts for kilovolts", p => p.Replace("buses.csv", "LV,0.4", "LV,690").Replace("transformers.csv", "1,11,0.4,6", "1,11,,6").Without("loads.csv").Without("motors.csv").Without("capacitors.csv").Without("converters.csv").Without("states.csv"),
             "buses.csv(5,nominal_kv): warning HS111: LV: 690 kV is no usual transmission voltage; it looks like volts. Fix: write 0.69 if 690 V is meant.",

@@ -69,6 +69,14 @@ public class FileTests
         { "line after a quoted line break", p => p.With("buses.csv", "bus,nominal_kv,note\nGRID-BUS,33,\"incoming\nfrom the utility\"\nMAIN,eleven,\nMAIN-B,11,\nLV,0.4,"),
             "buses.csv(4,nominal_kv): error HS010: MAIN: nominal_kv is 'eleven'; expected a number above 0 in kV. Fix: write digits with a decimal point, without units or thousands separators."
         },
+        { "separator hint of a spreadsheet", p => p.With("loads.csv", "sep=;\nname;bus;p_kw;power_factor\nLIGHTS;LV;350;0,92"),
+            "loads.csv(1): error HS007: no column of loads.csv stands in its first line; expected a header with name, bus, p_kw, power_factor, q_kvar, model, motor_share_percent, connection, source. Fix: write the header line; required are name, bus, p_kw."
+        },
+        { "two tables in one file", p => p.With("loads.csv", "name,bus,p_kw,power_factor\nLIGHTS,LV,350,0.92\nname,bus,rated_kw,power_factor\nPUMP,LV,35,0.9"),
+            "loads.csv(3,bus): error HS015: name: bus 'bus' is no bus; expected the name of a bus of buses.csv. Fix: add the bus to buses.csv.",
+            "loads.csv(3,p_kw): error HS010: name: p_kw is 'rated_kw'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators.",
+            "loads.csv(3,power_factor): error HS010: name: power_factor is 'power_factor'; expected a number above 0 up to 1. Fix: write digits with a decimal point, without units or thousands separators."
+        },
         { "row taken for a comment", p => p.Append("loads.csv", "#1 FAN,LV,3,0.9,,,,\n# 2 FAN,LV,3,0.9,,,,"),
             "loads.csv(3): warning HS118: the line begins with #, so it is a comment, but it has the cells of a row. Fix: put the name in double quotes if it is a row; write a blank after the # if it is a comment."
         },

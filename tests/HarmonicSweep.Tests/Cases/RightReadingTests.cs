@@ -55,10 +55,11 @@ public class RightReadingTests
     {
         CaseFile read = PlantText.Good
             .With("buses.csv", "bus,nominal_kv\nGRID-BUS,33\nMAIN,11\nMAIN-B,11\nLV,0.4\n\"Stra\u00DFe 4, S\u00FCd\",0.4\n\u5909\u96FB\u6240,0.4\n\uD83D\uDD0C 7,0.4\n\"5\"\" line\",0.4\n12,0.4")
-            .Append("loads.csv", "\"a \"\"quoted\"\" name, with comma\",\"Stra\u00DFe 4, S\u00FCd\",20,0.9,,,,\nlight,12,3,0.9,,,,").ReadSound();
+            .Append("loads.csv", "\"a \"\"quoted\"\" name, with comma\",\"Stra\u00DFe 4, S\u00FCd\",20,0.9,,,,\nlight,12,3,0.9,,,,\n\"# 2 fan\",12,3,0.9,,,,").ReadSound();
         Assert.Equal(["GRID-BUS", "MAIN", "MAIN-B", "LV", "Stra\u00DFe 4, S\u00FCd", "\u5909\u96FB\u6240", "\uD83D\uDD0C 7", "5\" line", "12"], read.Plant.Buses.Select(b => b.Name));
         Assert.Equal("Stra\u00DFe 4, S\u00FCd", Assert.IsType<LinearLoad>(read.Plant.FindElement("a \"quoted\" name, with comma")).Bus);
         Assert.Equal("12", Assert.IsType<LinearLoad>(read.Plant.FindElement("light")).Bus);
+        Assert.Equal("12", Assert.IsType<LinearLoad>(read.Plant.FindElement("# 2 fan")).Bus);
     }
 
     [Fact]

@@ -100,6 +100,30 @@ public class RobustnessTests(ITestOutputHelper output)
         Assert.True(clock.Elapsed < TimeSpan.FromSeconds(10), $"took {clock.Elapsed}");
     }
 
+    /// <summary>The cases that come with the tool are read without an error, and a warm reading is a matter of milliseconds.</summary>
+    [Fact]
+    public void Cases_of_the_repository_are_sound_and_quickly_read()
+    {
+        string[] folders = Directory.GetDirectories(Path.Combine(Path.GetDirectoryName(Here())!, "..", "..", "..", "cases"));
+        Assert.NotEmpty(folders);
+        foreach (string folder in folders)
+        {
+            CaseReadResult read = CaseReader.Read(folder);
+            Assert.True(read.Case is not null, string.Join("\n", read.Findings));
+        }
+
+        var clock = Stopwatch.StartNew();
+        for (int i = 0; i < 20; i++)
+        {
+            CaseReader.Read(folders.Single(f => f.EndsWith("demo-plant", StringComparison.Ordinal)));
+        }
+
+        output.WriteLine($"{clock.Elapsed.TotalMilliseconds / 20:0.00} ms");
+        Assert.True(clock.Elapsed < TimeSpan.FromSeconds(2), $"twenty readings took {clock.Elapsed}");
+    }
+
+    private static string Here([System.Runtime.CompilerServices.CallerFilePath] string here = "") => here;
+
     private static string[] ReadWith(PlantText plant, Action<string> prepare)
     {
         using var folder = new TempFolder();

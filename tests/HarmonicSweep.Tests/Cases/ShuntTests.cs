@@ -86,6 +86,9 @@ public class ShuntTests
         { "doubt: short-circuit current in A", p => p.Replace("supplies.csv", "500,,300,,", ",8700,,5200,"),
             "supplies.csv(2,sc_ka_max): warning HS114: GRID: a short-circuit power of 497272 MVA is outside the usual 1 to 200000. Fix: check that it is MVA (or kA) and not kVA, A or ohm."
         },
+        { "doubt: short-circuit power near zero", p => p.Replace("supplies.csv", "500,,300,,", "0.5,,0.3,,"),
+            "supplies.csv(2,sc_mva_max): warning HS114: GRID: a short-circuit power of 0.5 MVA is outside the usual 1 to 200000. Fix: check that it is MVA (or kA) and not kVA, A or ohm."
+        },
         { "doubt: X/R of a supply", p => p.Replace("supplies.csv", ",12,voltage", ",0.1,voltage"),
             "supplies.csv(2,x_over_r): warning HS108: GRID: X/R is 0.1, outside the usual 1 to 50. Fix: check that it is X over R at the fundamental."
         },
