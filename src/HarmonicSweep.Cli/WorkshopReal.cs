@@ -13,6 +13,7 @@ internal sealed partial record Workshop
     {
         ReadCase = static folder => CaseReader.Read(folder),
         NewCase = static folder => CaseTemplate.Write(folder),
+        WarmPlots = static () => PictureBook.Warm(),
         DrawPlots = Draw,
         Check = static (request, progress, cancellation) => CheckStudy.Run(request, progress, cancellation),
         Impedance = static (request, progress, cancellation) => ImpedanceStudy.Run(request, progress, cancellation),

@@ -6,8 +6,8 @@ namespace HarmonicSweep.Studies;
 /// <summary>What screening keeps of one solved state.</summary>
 internal sealed record ScreenedState
 {
-    /// <summary>Columns of the heat map at most: more than a picture can show serves nobody.</summary>
-    private const int MostMapColumns = 480;
+    /// <summary>Columns of the heat map at most: a fifth of an order up to 50; the resonances themselves are refined apart.</summary>
+    private const int MostMapColumns = 246;
 
     public required ScreenJob Job { get; init; }
 
