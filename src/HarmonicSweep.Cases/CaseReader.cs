@@ -20,6 +20,7 @@ public sealed class CaseReader
     private readonly FindingList _findings = new();
     private readonly List<AssumedValue> _assumed = [];
     private readonly List<SourceEntry> _sources = [];
+    private readonly HashSet<string> _unread = new(StringComparer.Ordinal);
     private readonly SortedDictionary<string, byte[]> _files = new(StringComparer.Ordinal);
 
     private CaseReader(string folder) => _folder = folder;
@@ -43,9 +44,19 @@ public sealed class CaseReader
             return null;
         }
 
-        LoadFiles();
+        try
+        {
+            LoadFiles();
+        }
+        catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
+        {
+            _findings.Error(Ids.Unreadable, null, $"the folder '{_folder}' cannot be read: {exception.Message}", "mend its permissions.");
+            return null;
+        }
+
         CaseToml toml = ReadToml();
         var tables = new TableReader(_findings, _assumed, _sources);
+        tables.Incomplete.UnionWith(_unread);
         List<Row> busRows = Rows(tables, Tables.Buses);
         var buses = new Dictionary<string, Bus>(StringComparer.Ordinal);
         foreach (Row row in busRows)
@@ -60,7 +71,7 @@ public sealed class CaseReader
         Dictionary<string, Spectrum> spectra = SpectrumReader.Read(Rows(tables, Tables.Spectra), _assumed);
         List<PlantElement> elements = Elements(tables, buses, spectra, toml.FrequencyHz);
         Dictionary<string, PlantElement> byName = elements.ToDictionary(e => e.Name, StringComparer.Ordinal);
-        List<OperatingState> states = StateReader.Read(Rows(tables, Tables.States), byName, tables.Names.Keys, tables.BusNames);
+        List<OperatingState> states = StateReader.Read(Rows(tables, Tables.States), byName, tables);
         foreach (Table later in Tables.All.Where(t => t.Later))
         {
             RefuseLater(later);
@@ -83,19 +94,16 @@ public sealed class CaseReader
     private void LoadFiles()
     {
         string[] known = [CaseFileName, .. Tables.All.Select(t => t.File)];
-        foreach (string path in Directory.EnumerateFiles(_folder).Order(StringComparer.Ordinal))
+        foreach (string path in Directory.EnumerateFileSystemEntries(_folder).Order(StringComparer.Ordinal))
         {
             string name = Path.GetFileName(path);
             if (known.Contains(name))
             {
-                try
-                {
-                    _files[name] = File.ReadAllBytes(path);
-                }
-                catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
-                {
-                    _findings.Error(Ids.Encoding, new SourceLocation(name, 0), $"the file cannot be read: {exception.Message}", "close the program that holds it, or mend its permissions.");
-                }
+                LoadFile(path, name);
+            }
+            else if (Directory.Exists(path))
+            {
+                continue;
             }
             else if (Path.GetExtension(name).ToLowerInvariant() is ".csv" or ".toml" && !name.StartsWith('.'))
             {
@@ -106,8 +114,35 @@ public sealed class CaseReader
         }
     }
 
+    private void LoadFile(string path, string name)
+    {
+        try
+        {
+            if (!Directory.Exists(path))
+            {
+                _files[name] = File.ReadAllBytes(path);
+                return;
+            }
+
+            _findings.Error(Ids.Unreadable, new SourceLocation(name, 0), $"{name} is a folder; expected a file.", "rename the folder, and write the table as a file.");
+        }
+        catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
+        {
+            _findings.Error(
+                Ids.Unreadable, new SourceLocation(name, 0), $"{name} cannot be read: {exception.Message}",
+                "close the program that holds it, mend its permissions, or mend the link that leads nowhere.");
+        }
+
+        _unread.Add(name);
+    }
+
     private CaseToml ReadToml()
     {
+        if (_unread.Contains(CaseFileName))
+        {
+            return CaseToml.Nothing;
+        }
+
         if (!_files.TryGetValue(CaseFileName, out byte[]? bytes))
         {
             _findings.Error(
@@ -119,16 +154,28 @@ public sealed class CaseReader
         return TextFile.Decode(bytes, CaseFileName, _findings) is { } text ? CaseToml.Read(text, _findings, _assumed) : CaseToml.Nothing;
     }
 
-    private List<Row> Rows(TableReader tables, Table table) =>
-        _files.TryGetValue(table.File, out byte[]? bytes) && TextFile.Decode(bytes, table.File, _findings) is { } text
-            ? tables.Read(table, CsvFile.Read(table.File, text, _findings))
-            : [];
+    private List<Row> Rows(TableReader tables, Table table)
+    {
+        if (!_files.TryGetValue(table.File, out byte[]? bytes))
+        {
+            return [];
+        }
+
+        if (TextFile.Decode(bytes, table.File, _findings) is not { } text)
+        {
+            tables.Incomplete.Add(table.File);
+            return [];
+        }
+
+        return tables.Read(table, CsvFile.Read(table.File, text, _findings));
+    }
 
     private void CheckBuses(TableReader tables, CaseToml toml)
     {
         if (tables.BusNames.Count == 0)
         {
-            if (!_findings.HasErrors || !_files.ContainsKey(Tables.Buses.File))
+            // where rows of buses.csv were lost, that is what has to be mended
+            if (!tables.Incomplete.Contains(Tables.Buses.File))
             {
                 _findings.Error(Ids.NoBuses, new SourceLocation(Tables.Buses.File, 0), "the plant has no bus.", "list the buses in buses.csv: name and nominal_kv.");
             }
@@ -136,17 +183,17 @@ public sealed class CaseReader
             return;
         }
 
-        if (toml.Settings?.PccBus is { } pcc && !tables.BusNames.Contains(pcc))
+        if (toml.PccBus is { } pcc && !tables.BusNames.Contains(pcc) && !tables.Incomplete.Contains(Tables.Buses.File))
         {
             _findings.Error(
-                Ids.PccUnknown, toml.PccLocation, $"pcc '{pcc}' is no bus.", NearestName.Suggest(pcc, tables.BusNames, "name a bus of buses.csv."));
+                Ids.PccUnknown, toml.PccLocation, $"pcc '{pcc.Shown()}' is no bus; expected the name of a bus of buses.csv.", NearestName.Suggest(pcc, tables.BusNames, "name a bus of buses.csv."));
         }
     }
 
     private List<PlantElement> Elements(
         TableReader tables, Dictionary<string, Bus> buses, Dictionary<string, Spectrum> spectra, double frequencyHz)
     {
-        var builder = new ElementBuilder(buses, spectra, frequencyHz, _findings);
+        var builder = new ElementBuilder(buses, spectra, tables, frequencyHz, _findings);
         var elements = new List<PlantElement>();
         foreach (Table table in Tables.All.Where(t => !t.Later && t != Tables.Buses && t != Tables.Spectra && t != Tables.States))
         {

@@ -12,13 +12,18 @@ public static class CaseTemplate
     /// <returns>Null when written; a finding when the folder already holds a case or cannot be written. Then nothing is written.</returns>
     public static Finding? Write(string folder)
     {
-        var files = new Dictionary<string, string>(StringComparer.Ordinal) { ["case.toml"] = CaseToml(Path.GetFileName(Path.GetFullPath(folder))) };
+        if (string.IsNullOrWhiteSpace(folder) || folder.Contains('\0'))
+        {
+            return new Finding(Severity.Error, Ids.FolderInUse, null, "the name of the folder is blank or has a zero character in it.", "give the path of a new or empty folder.");
+        }
+
+        var files = new Dictionary<string, string>(StringComparer.Ordinal) { ["case.toml"] = CaseToml(TitleOf(folder)) };
         foreach (Table table in Tables.All.Where(t => !t.Later))
         {
             files[table.File] = TableText(table);
         }
 
-        if (files.Keys.FirstOrDefault(f => File.Exists(Path.Combine(folder, f))) is { } taken)
+        if (files.Keys.FirstOrDefault(f => Path.Exists(Path.Combine(folder, f))) is { } taken)
         {
             return new Finding(
                 Severity.Error, Ids.FolderInUse, null, $"'{folder}' already holds {taken}; nothing was written.", "give a new or empty folder.");
@@ -35,9 +40,17 @@ public static class CaseTemplate
         }
     }
 
+    /// <summary>Name of the folder, as far as it can stand in a title.</summary>
+    private static string TitleOf(string folder)
+    {
+        string name = Path.GetFileName(Path.TrimEndingDirectorySeparator(Path.GetFullPath(folder)));
+        string title = new([.. name.Where(c => !char.IsControl(c) && c is not ('"' or '\\'))]);
+        return string.IsNullOrWhiteSpace(title) ? "New case" : title;
+    }
+
     private static string CaseToml(string title) => $"""
         # What is not a table. The tables beside this file start with # lines that say what their columns mean.
-        title = "{title.Replace("\\", "", StringComparison.Ordinal).Replace("\"", "", StringComparison.Ordinal)}"
+        title = "{title}"
         frequency_hz = 50
 
         [sweep]
@@ -61,7 +74,7 @@ public static class CaseTemplate
         foreach (Column column in table.Columns.Where(c => !c.Later))
         {
             string mark = column.Required ? "*" : " ";
-            string comment = column.Comment.Length > 0 ? "; " + column.Comment : "";
+            string comment = column.Comment.Length > 0 && column.Comment != column.Expected ? "; " + column.Comment : "";
             text.Append("# ").Append(mark).Append(' ').Append(column.Name).Append(": ").Append(column.Expected).Append(comment).Append('\n');
         }
 

@@ -9,6 +9,11 @@ public static class WholeFiles
     public static void Write(string folder, IReadOnlyDictionary<string, byte[]> files)
     {
         Directory.CreateDirectory(folder);
+        if (files.Keys.FirstOrDefault(f => Directory.Exists(Path.Combine(folder, f))) is { } taken)
+        {
+            throw new IOException($"a folder named {taken} stands in the way of the file of that name.");
+        }
+
         var passing = new List<string>();
         try
         {

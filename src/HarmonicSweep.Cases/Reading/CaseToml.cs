@@ -41,6 +41,9 @@ internal sealed class CaseToml
     /// <summary>Settings of the studies; null after an error in them.</summary>
     public StudySettings? Settings { get; private set; }
 
+    /// <summary>Bus of the PCC; null when it was not named.</summary>
+    public string? PccBus { get; private set; }
+
     /// <summary>Where the PCC was named; null when it was not.</summary>
     public SourceLocation? PccLocation => _values.TryGetValue("limits.pcc", out var pcc) ? new SourceLocation(File, pcc.Line, "pcc") : null;
 
@@ -48,14 +51,17 @@ internal sealed class CaseToml
     public static CaseToml Read(string text, FindingList findings, List<AssumedValue> assumed)
     {
         var toml = new CaseToml(findings, assumed);
-        DocumentSyntax document = SyntaxParser.Parse(text, File, true);
+        text = text.Replace("\r\n", "\n", StringComparison.Ordinal).Replace('\r', '\n');
+
+        // without the library's own check of repeated keys: Collect makes it, with both lines
+        DocumentSyntax document = SyntaxParser.Parse(text, File, false);
         if (document.HasErrors)
         {
-            foreach (DiagnosticMessage message in document.Diagnostics)
+            string[] lines = text.Split('\n');
+            foreach (int line in FaultyLines(lines, document))
             {
-                findings.Error(
-                    Ids.TomlSyntax, new SourceLocation(File, message.Span.Start.Line + 1),
-                    $"this is not TOML: {message.Message.TrimEnd('.')}.", "write key = value, texts in double quotes, lists in [ ].");
+                (string message, string remedy) = TomlSlip.Explain(lines[line]);
+                findings.Error(Ids.TomlSyntax, new SourceLocation(File, line + 1), message, remedy);
             }
 
             return toml;
@@ -65,12 +71,18 @@ internal sealed class CaseToml
         foreach (TableSyntaxBase table in document.Tables)
         {
             string name = Join(table.Name);
+            int line = table.Span.Start.Line + 1;
             if (name.Length == 0 || !_keys.ContainsKey(name))
             {
                 findings.Error(
-                    Ids.UnknownKey, new SourceLocation(File, table.Span.Start.Line + 1, name), $"unknown table [{name}]; known are [sweep], [limits] and [summation].",
+                    Ids.UnknownKey, new SourceLocation(File, line, name.Shown()), $"unknown table [{name.Shown()}]; known are [sweep], [limits] and [summation].",
                     NearestName.Suggest(name, ["sweep", "limits", "summation"], "remove it."));
                 continue;
+            }
+
+            if (table is TableArraySyntax)
+            {
+                findings.Error(Ids.UnknownKey, new SourceLocation(File, line, name), $"[[{name}]] stands in double brackets; expected [{name}].", "write one pair of brackets.");
             }
 
             toml.Collect(name, table.Items);
@@ -78,6 +90,18 @@ internal sealed class CaseToml
 
         toml.Interpret();
         return toml;
+    }
+
+    /// <summary>
+    /// Lines to blame. One slip makes the parser stumble over sound lines after it, and one that leaves a bracket open is noticed
+    /// in the next line only; so a line is blamed when it is wrong on its own.
+    /// </summary>
+    private static List<int> FaultyLines(string[] lines, DocumentSyntax document)
+    {
+        List<int> noticed = [.. document.Diagnostics.Select(d => Math.Min(d.Span.Start.Line, lines.Length - 1)).Distinct().Order()];
+        List<int> candidates = [.. Enumerable.Range(0, noticed[0]).Where(l => lines[l].Trim().Length > 0).TakeLast(1), .. noticed];
+        List<int> faulty = [.. candidates.Where(l => SyntaxParser.Parse(lines[l], File, false).HasErrors)];
+        return faulty.Count > 0 ? faulty : [noticed[0]];
     }
 
     private static string Join(KeySyntax? key) => key?.ToString().Trim().Trim('"') ?? "";
@@ -94,26 +118,31 @@ internal sealed class CaseToml
             if (!_keys.TryGetValue(owner, out string[]? known) || !known.Contains(name))
             {
                 string[] candidates = known ?? [.. _keys.SelectMany(k => k.Value)];
+                string remedy = _keys.ContainsKey(name) ? $"write [{name}] on a line of its own, and its keys under it." : NearestName.Of(name, candidates) is null ? Elsewhere(name) : NearestName.Suggest(name, candidates, "remove it.");
                 _findings.Error(
-                    Ids.UnknownKey, new SourceLocation(File, line, key), $"unknown key '{key}'{(owner.Length > 0 ? $" in [{owner}]" : "")}; known are {string.Join(", ", candidates)}.",
-                    NearestName.Suggest(name, candidates, Elsewhere(name)));
+                    Ids.UnknownKey, new SourceLocation(File, line, key.Shown()), $"unknown key '{key.Shown()}'{(owner.Length > 0 && table.Length > 0 ? $" in [{owner}]" : "")}; known are {string.Join(", ", candidates)}.",
+                    remedy);
                 continue;
             }
 
-            if (ValueOf(pair.Value) is { } value)
+            if (_values.TryGetValue(full, out var earlier))
             {
-                _values[full] = (value, line);
+                _findings.Error(Ids.RepeatedKey, new SourceLocation(File, line, name), FormattableString.Invariant($"{name} is already given in line {earlier.Line}; expected it once."), "keep one of them.");
+                continue;
             }
-            else
-            {
-                _findings.Error(Ids.KeyType, new SourceLocation(File, line, key), $"{key} has a value of a kind not expected here.", "write a number, a text in quotes or a list of texts.");
-            }
+
+            // a value of a kind that no key takes is kept as it is: who asks for it says what it expects
+            _values[full] = (ValueOf(pair.Value) ?? new object(), line);
         }
     }
 
-    private static string Elsewhere(string name) => _keys.FirstOrDefault(k => k.Value.Contains(name)) is { Value: not null } home
-        ? $"move it under {(home.Key.Length == 0 ? "the top of the file, before the first [table]" : $"[{home.Key}]")}."
-        : "remove it.";
+    private static string Elsewhere(string name)
+    {
+        string? meant = NearestName.Of(name, _keys.SelectMany(k => k.Value));
+        string home = _keys.FirstOrDefault(k => k.Value.Contains(meant)).Key ?? "";
+        string place = home.Length == 0 ? "to the top of the file, before the first [table]" : $"under [{home}]";
+        return meant is null ? "remove it." : meant == name ? $"move it {place}." : $"write {meant}, if that is meant, and move it {place}.";
+    }
 
     private static object? ValueOf(ValueSyntax? value) => value switch
     {
@@ -131,6 +160,11 @@ internal sealed class CaseToml
     {
         int errors = _findings.ErrorCount;
         Title = Text("title") ?? "";
+        if (Title.Any(char.IsControl))
+        {
+            Error(Ids.KeyType, "title", "title has a line break or a control character in it; expected a text of one line.", "write it in one line.");
+        }
+
         if (!_values.ContainsKey("title"))
         {
             Missing("title", "a text in quotes");
@@ -139,6 +173,12 @@ internal sealed class CaseToml
         if (Number("frequency_hz", "Hz") is { } frequency)
         {
             FrequencyHz = frequency;
+            if (frequency is < 10 or > 1000)
+            {
+                _findings.Warning(
+                    Ids.Frequency, new SourceLocation(File, _values["frequency_hz"].Line, "frequency_hz"), $"a fundamental of {Schema.PlainNumber.Plain(frequency)} Hz is outside the usual 10 to 1000.",
+                    "check that it is the frequency of the supply in Hz.");
+            }
         }
         else if (!_values.ContainsKey("frequency_hz"))
         {
@@ -149,7 +189,7 @@ internal sealed class CaseToml
         SweepRange? sweep = Sweep();
         SummationRule rule = Rule();
         string[] standards = Standards();
-        string? pcc = Text("limits.pcc");
+        string? pcc = PccBus = Text("limits.pcc");
         if (pcc is null && !_values.ContainsKey("limits.pcc"))
         {
             _findings.Note(
@@ -179,7 +219,9 @@ internal sealed class CaseToml
         }
         else if ((to - from) / step > 1_000_000)
         {
-            Error(Ids.KeyRange, "sweep.step_hz", "the range has more than 1,000,000 points.", "give a larger step_hz; resonances are found between the points all the same.");
+            Error(
+                Ids.KeyRange, "sweep.step_hz",
+                $"from_hz {Schema.PlainNumber.Plain(from)} to to_hz {Schema.PlainNumber.Plain(to)} in steps of {Schema.PlainNumber.Plain(step)} Hz is more than 1000000 points; expected fewer.", "give a larger step_hz; resonances are found between the points all the same.");
         }
 
         return new SweepRange(from, to, step);
@@ -190,6 +232,7 @@ internal sealed class CaseToml
         string? text = Text("summation.rule");
         if (text is null)
         {
+            _assumed.Add(new AssumedValue("case", "rule", "phasor", "default sum over sources: their angles are known"));
             return SummationRule.Phasor;
         }
 
@@ -197,7 +240,7 @@ internal sealed class CaseToml
         int index = Array.IndexOf(words, text.ToLowerInvariant());
         if (index < 0)
         {
-            Error(Ids.UnknownKey, "summation.rule", $"rule is '{text}'; expected one of {string.Join(", ", words)}.", NearestName.Suggest(text, words, "write one of those words."));
+            Error(Ids.UnknownWord, "summation.rule", $"rule is '{text.Shown()}'; expected one of {string.Join(", ", words)}.", NearestName.Suggest(text, words, "write one of those words."));
             return SummationRule.Phasor;
         }
 
@@ -215,7 +258,7 @@ internal sealed class CaseToml
         string[]? names = given.Value as string[] ?? (given.Value is string one ? [one] : null);
         if (names is null)
         {
-            Error(Ids.KeyType, "limits.standards", "standards is not a list of texts.", $"write standards = [\"{Ieee519.Edition}\"].");
+            Error(Ids.KeyType, "limits.standards", "standards is not a list of texts; expected the names of limit sets.", $"write standards = [\"{Ieee519.Edition}\"].");
             return [];
         }
 
@@ -234,7 +277,7 @@ internal sealed class CaseToml
             }
             else
             {
-                Error(Ids.UnknownStandard, "limits.standards", $"limit set '{name}' is not known; known is {Ieee519.Edition}.", $"write standards = [\"{Ieee519.Edition}\"], or [] to judge nothing.");
+                Error(Ids.UnknownStandard, "limits.standards", $"limit set '{name.Shown()}' is not known; expected {Ieee519.Edition}.", $"write standards = [\"{Ieee519.Edition}\"], or [] to judge nothing.");
             }
         }
 
@@ -248,7 +291,7 @@ internal sealed class CaseToml
             return given;
         }
 
-        _assumed.Add(new AssumedValue("case", key[(key.IndexOf('.') + 1)..], Schema.PlainNumber.Plain(otherwise) + " Hz", why));
+        _assumed.Add(new AssumedValue("case", Bare(key), Schema.PlainNumber.Plain(otherwise) + " Hz", why));
         return otherwise;
     }
 
@@ -261,13 +304,15 @@ internal sealed class CaseToml
 
         if (value.Value is not double number)
         {
-            Error(Ids.KeyType, key, $"{key} is not a number; expected a number above 0 in {unit}.", "write digits without quotes.");
+            Error(
+                Ids.KeyType, key, $"{Bare(key)} is {(value.Value is string ? "a text" : "not a number")}; expected a number above 0 in {unit}.", "write digits without quotes.");
             return null;
         }
 
-        if (!(number > 0) || !double.IsFinite(number))
+        if (!(number > 0) || !NumberSize.Fits(number))
         {
-            Error(Ids.KeyRange, key, $"{key} is {Schema.PlainNumber.Plain(number)}; expected a number above 0 in {unit}.", "correct the value.");
+            string size = number > 0 ? $" ({NumberSize.Words})" : "";
+            Error(Ids.KeyRange, key, $"{Bare(key)} is {Schema.PlainNumber.Plain(number)}; expected a number above 0 in {unit}{size}.", "correct the value.");
             return null;
         }
 
@@ -286,7 +331,8 @@ internal sealed class CaseToml
             return text;
         }
 
-        Error(Ids.KeyType, key, $"{key} is not a text; expected a text in quotes.", "write it in double quotes.");
+        string found = value.Value is string ? "is blank" : "is not a text";
+        Error(Ids.KeyType, key, $"{Bare(key)} {found}; expected a text in quotes.", $"write {Bare(key)} = \"...\"{(key == "limits.pcc" ? ", or remove the line" : "")}.");
         return null;
     }
 
@@ -294,5 +340,7 @@ internal sealed class CaseToml
         Ids.MissingKey, new SourceLocation(File, 0, key), $"{key} is missing; expected {expected}.", $"add {key} = ... at the top of {File}.");
 
     private void Error(string id, string key, string message, string remedy) => _findings.Error(
-        id, new SourceLocation(File, _values.TryGetValue(key, out var v) ? v.Line : 0, key[(key.IndexOf('.') + 1)..]), message, remedy);
+        id, new SourceLocation(File, _values.TryGetValue(key, out var v) ? v.Line : 0, Bare(key)), message, remedy);
+
+    private static string Bare(string key) => key[(key.IndexOf('.') + 1)..];
 }

@@ -15,8 +15,8 @@ internal sealed class DecimalMarks(string file, bool commas, FindingList finding
     private string _commaCell = "";
     private bool _mixed;
 
-    /// <summary>The number, or null; <paramref name="complained"/> when the finding about it was given here.</summary>
-    public double? Parse(string cell, SourceLocation location, out bool complained)
+    /// <summary>The number, finite; null when it is none; <paramref name="complained"/> when the finding about it was given here.</summary>
+    public double? Parse(string cell, SourceLocation location, string called, out bool complained)
     {
         complained = false;
         bool comma = cell.Contains(',');
@@ -26,7 +26,7 @@ internal sealed class DecimalMarks(string file, bool commas, FindingList finding
             complained = true;
             findings.Error(
                 Ids.DecimalMarks, location,
-                $"'{cell}' has a comma {(point ? "and a point" : commas ? "more than once" : "in a table whose columns are separated by commas")}; expected digits with one decimal mark.",
+                $"{called}{location.Column} is '{cell.Shown()}', with a comma {(point ? "and a point" : commas ? "more than once" : "in a table whose columns are separated by commas")}; expected digits with one decimal mark.",
                 "leave out thousands separators and write decimals with a point.");
             return null;
         }
@@ -46,7 +46,7 @@ internal sealed class DecimalMarks(string file, bool commas, FindingList finding
             complained = true;
             findings.Error(
                 Ids.DecimalMarks, location,
-                $"{file} writes decimals both ways: '{_commaCell}' at {_comma} and '{_pointCell}' at {_point}; expected one way in a table.",
+                $"{file} writes decimals both ways: '{_commaCell.Shown()}' at {_comma} and '{_pointCell.Shown()}' at {_point}; expected one way in a table.",
                 "write every decimal with a point, or every one with a comma.");
             return null;
         }

@@ -78,7 +78,8 @@ internal sealed partial class ElementBuilder
     {
         if (resistanceOhmPerKm > 0)
         {
-            return ResistanceLaw.Bessel(resistanceOhmPerKm, fundamentalHz);
+            // without a fundamental (its own error says so) nothing is built that could be used
+            return double.IsNaN(fundamentalHz) ? ResistanceLaw.Constant : ResistanceLaw.Bessel(resistanceOhmPerKm, fundamentalHz);
         }
 
         row.Error(Ids.Rule, "resistance_ohm_km", $"{row.Name}: the law bessel needs a resistance above 0 ohm/km.", "give the resistance, or choose another law.");
@@ -115,7 +116,7 @@ internal sealed partial class ElementBuilder
         double lv = RatedKv(row, "lv_kv", "lv_side");
         if (hv < lv)
         {
-            row.Warning(Ids.Sides, "hv_side", $"{row.Name}: its high-voltage side has {hv.Plain()} kV and its low-voltage side {lv.Plain()} kV.", "exchange hv_side and lv_side.");
+            row.Warning(Ids.Sides, "hv_side", $"{row.Name}: its high-voltage side has {hv.Plain()} kV and its low-voltage side {lv.Plain()} kV.", "exchange hv_side and lv_side, and their rated voltages.");
         }
 
         double rated = row.Number("rated_mva");
@@ -141,8 +142,8 @@ internal sealed partial class ElementBuilder
             TapPercent = row.Number("tap_percent", 0, "middle tap"),
             Law = law,
             EddyLossPu = eddy,
-            NoLoadLossKw = row.Find("no_load_loss_kw") ?? 0,
-            NoLoadCurrentPercent = row.Find("no_load_current_percent") ?? 0,
+            NoLoadLossKw = row.Number("no_load_loss_kw", 0, "no no-load loss given"),
+            NoLoadCurrentPercent = row.Number("no_load_current_percent", 0, "no no-load current given"),
         };
     }
 

@@ -6,6 +6,9 @@ namespace HarmonicSweep.Cases.Reading;
 /// <content>Supplies, generators, loads, motors, banks, filters and converters.</content>
 internal sealed partial class ElementBuilder
 {
+    private const string MachineLaw = "common practice for machines";
+    private const string CoilLaw = "the resistance of its coil is held constant";
+
     private Supply? Supply(Row row)
     {
         double nominal = NominalOf(row);
@@ -22,9 +25,10 @@ internal sealed partial class ElementBuilder
         }
         else if (least > maximum)
         {
-            row.Error(Ids.Rule, "sc_mva_min", $"{row.Name}: the smallest short-circuit power, {least.Value.Plain()} MVA, exceeds the largest, {maximum.Plain()} MVA.", "exchange them.");
+            row.Error(Ids.Rule, row.Has("sc_ka_min") ? "sc_ka_min" : "sc_mva_min", $"{row.Name}: the smallest short-circuit power, {least.Value.Short()} MVA, exceeds the largest, {maximum.Short()} MVA.", "exchange them.");
         }
 
+        row.Assume("resistance_law", "constant", "the resistance of a supply is held constant");
         double xOverR = row.Number("x_over_r", 10, "no X/R given");
         Plausibility.XOverR(row, "x_over_r", xOverR, 1, 50);
         Plausibility.ShortCircuitPower(row, maximum);
@@ -75,11 +79,18 @@ internal sealed partial class ElementBuilder
         if (grounding is not ("" or "open"))
         {
             row.Error(
-                Ids.LaterModel, "grounding", $"{row.Name}: grounding is '{row.Text("grounding")}', but its model is not in this version.",
+                Ids.LaterModel, "grounding", $"{row.Name}: grounding is '{row.Text("grounding")}', but its model is not in this version; expected open or a blank cell.",
                 "leave the cell blank or write open; positive and negative sequence do not depend on it.");
         }
 
         double direct = row.Number("xd2_pu");
+        if (row.Has("x2_pu") && row.Has("xq2_pu"))
+        {
+            row.Note(Ids.NoEffect, "xq2_pu", $"{row.Name}: xq2_pu has no effect where x2_pu is given.", "nothing needs mending; x2_pu is what harmonics see.");
+        }
+
+        row.Assume("resistance_law", "sqrt", MachineLaw);
+        Plausibility.GeneratorRating(row);
         double quadrature = row.Has("x2_pu") ? direct : row.Number("xq2_pu", direct, "xq2_pu = xd2_pu");
         return new Generator
         {
@@ -115,7 +126,7 @@ internal sealed partial class ElementBuilder
         if (model == LoadModel.Cigre && (active <= 0 || reactive <= 0.74 / 6.7 * active))
         {
             row.Error(
-                Ids.Rule, "model", $"{row.Name}: the model cigre needs P above 0 and Q/P above 0.1104 (0.74/6.7); P is {active.Plain()} kW, Q is {reactive.Plain()} kvar.",
+                Ids.Rule, "model", $"{row.Name}: the model cigre needs P above 0 and Q/P above 0.1104 (0.74/6.7); P is {active.Plain()} kW, Q is {reactive.Short()} kvar.",
                 "use the model parallel, or check the power factor.");
         }
 
@@ -135,6 +146,7 @@ internal sealed partial class ElementBuilder
     private Motor Motor(Row row)
     {
         Plausibility.Efficiency(row);
+        row.Assume("resistance_law", "sqrt", MachineLaw);
         Plausibility.Kilowatt(row, "rated_kw", row.Number("rated_kw"), NominalOf(row));
         return new Motor
         {
@@ -167,6 +179,16 @@ internal sealed partial class ElementBuilder
         if (detuning > 0 && !row.Has("reactor_q"))
         {
             row.Error(Ids.Rule, "reactor_q", $"{row.Name}: it has detuning_percent {detuning.Plain()} but no reactor_q; expected a number above 0.", "give X/R of the reactor at the fundamental (maker's sheet).");
+        }
+
+        if (row.Has("reactor_q") && !row.Has("detuning_percent"))
+        {
+            row.Warning(Ids.NoEffect, "reactor_q", $"{row.Name}: reactor_q has no effect without detuning_percent: the bank is taken without a reactor.", "give detuning_percent, or leave reactor_q blank.");
+        }
+
+        if (detuning > 0)
+        {
+            row.Assume("resistance_law", "constant", CoilLaw);
         }
 
         double loss = row.Number("loss_w_per_kvar", 0, "no loss given");
@@ -211,7 +233,12 @@ internal sealed partial class ElementBuilder
 
         if (kind == FilterKind.SingleTuned && row.Has("damping_ohm"))
         {
-            row.Error(Ids.Rule, "damping_ohm", $"{row.Name}: a single_tuned filter has no damping resistor.", "leave damping_ohm blank, or choose a damped kind.");
+            row.Error(Ids.Rule, "damping_ohm", $"{row.Name}: a single_tuned filter has no damping resistor; expected a blank cell.", "leave damping_ohm blank, or choose a damped kind.");
+        }
+
+        if (!hasCoilResistance && row.Has("q_factor") && row.Has("damping_ohm"))
+        {
+            row.Note(Ids.NoEffect, "q_factor", $"{row.Name}: q_factor has no effect where damping_ohm is given.", "nothing needs mending; damping_ohm is the damping resistor.");
         }
 
         if (kind == FilterKind.CType && tuned <= 1)
@@ -224,11 +251,15 @@ internal sealed partial class ElementBuilder
         {
             row.Error(
                 Ids.Rule, "second_order",
-                kind == FilterKind.DoubleTuned ? $"{row.Name}: a double_tuned filter needs second_order above tuned_order." : $"{row.Name}: second_order is for double_tuned filters only.",
+                kind == FilterKind.DoubleTuned ? $"{row.Name}: second_order is {(second is { } order ? order.Plain() : "blank")}; expected a number above its tuned_order, {tuned.Plain()}, for a double_tuned filter."
+                    : $"{row.Name}: second_order is for double_tuned filters only; expected a blank cell.",
                 kind == FilterKind.DoubleTuned ? "give the upper of its two orders." : "leave it blank.");
         }
 
         double nominal = NominalOf(row);
+        double rated = row.Number("rated_kv", nominal, NominalKv);
+        Plausibility.FilterVoltage(row, rated, nominal);
+        row.Assume("resistance_law", "constant", CoilLaw);
         return new Filter
         {
             Name = row.Name,
@@ -236,7 +267,7 @@ internal sealed partial class ElementBuilder
             Bus = row.Text("bus"),
             Kind = kind,
             RatedKvar = row.Number("rated_kvar"),
-            RatedKv = row.Number("rated_kv", nominal, NominalKv),
+            RatedKv = rated,
             TunedOrder = tuned,
             SecondOrder = second,
             QualityFactor = row.Find("q_factor"),
@@ -257,11 +288,9 @@ internal sealed partial class ElementBuilder
         {
             UnknownSpectrum(row, "spectrum");
         }
-        else if (!spectrum.Lines.Any(l => l.Order == 1 && Math.Abs(l.Percent - 100) <= 1e-9))
+        else
         {
-            findings.Error(
-                Ids.NoFundamental, spectrum.Location.At("percent"), $"spectrum {spectrum.Name}, used by {row.Name}, has no line of order 1 at 100 percent.",
-                "add the line 'order 1, percent 100', and give the others in percent of it.");
+            CheckFundamental(row, spectrum);
         }
 
         if (!rated || spectrum is null)
@@ -289,7 +318,30 @@ internal sealed partial class ElementBuilder
         };
     }
 
-    private void UnknownSpectrum(Row row, string column) => row.Error(
-        Ids.UnknownSpectrum, column, $"{row.Name}: spectrum '{row.Text(column)}' is not in spectra.csv.",
-        NearestName.Suggest(row.Text(column), spectra.Keys, "add its lines to spectra.csv."));
+    private void CheckFundamental(Row row, Spectrum spectrum)
+    {
+        double? percent = spectrum.Lines.Where(l => l.Order == 1).Select(l => (double?)l.Percent).FirstOrDefault();
+        if ((percent is { } given && Math.Abs(given - 100) <= 1e-9) || tables.LeftOut.Contains((Tables.Spectra.File, spectrum.Name)))
+        {
+            return;
+        }
+
+        string found = percent is null ? "has no line of order 1" : $"has {percent.Value.Plain()} percent at order 1";
+        row.Error(
+            Ids.NoFundamental, "spectrum", $"{row.Name}: its spectrum {spectrum.Name} ({spectrum.Location}) {found}; expected 100 percent of the fundamental current.",
+            $"add the line {spectrum.Name},1,100,0 to spectra.csv, and give the others in percent of it.");
+    }
+
+    private void UnknownSpectrum(Row row, string column)
+    {
+        if (tables.Incomplete.Contains(Tables.Spectra.File) || tables.LeftOut.Contains((Tables.Spectra.File, row.Text(column))))
+        {
+            // it may stand in lines that could not be read, whose own errors say so
+            return;
+        }
+
+        row.Error(
+            Ids.UnknownSpectrum, column, $"{row.Name}: {column} '{row.Text(column).Shown()}' is not in spectra.csv; expected the name of a spectrum of spectra.csv.",
+            NearestName.Suggest(row.Text(column), spectra.Keys, "add its lines to spectra.csv."));
+    }
 }

@@ -4,7 +4,7 @@ namespace HarmonicSweep.Cases.Reading;
 
 /// <summary>Makes elements of checked rows: fills defaults in, holds the rules between cells, and doubts what looks wrong.</summary>
 internal sealed partial class ElementBuilder(
-    IReadOnlyDictionary<string, Bus> buses, IReadOnlyDictionary<string, Spectrum> spectra, double fundamentalHz, FindingList findings)
+    IReadOnlyDictionary<string, Bus> buses, IReadOnlyDictionary<string, Spectrum> spectra, TableReader tables, double fundamentalHz, FindingList findings)
 {
     private const string NominalKv = "nominal_kv of its bus";
 

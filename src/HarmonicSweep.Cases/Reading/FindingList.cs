@@ -26,14 +26,28 @@ internal sealed class FindingList
     {
         HasErrors = true;
         ErrorCount++;
-        _findings.Add(new Finding(Severity.Error, id, location, message, remedy));
+        Add(Severity.Error, id, location, message, remedy);
     }
 
     /// <summary>Adds a warning.</summary>
     public void Warning(string id, SourceLocation? location, string message, string remedy) =>
-        _findings.Add(new Finding(Severity.Warning, id, location, message, remedy));
+        Add(Severity.Warning, id, location, message, remedy);
 
     /// <summary>Adds a note.</summary>
     public void Note(string id, SourceLocation? location, string message, string remedy) =>
-        _findings.Add(new Finding(Severity.Note, id, location, message, remedy));
+        Add(Severity.Note, id, location, message, remedy);
+
+    /// <summary>A finding is one line, whatever the cell it quotes holds.</summary>
+    private void Add(Severity severity, string id, SourceLocation? location, string message, string remedy) => _findings.Add(
+        new Finding(severity, id, location?.Column is { } column ? location.At(OneLine(column)) : location, OneLine(message), OneLine(remedy)));
+
+    private static string OneLine(string text) => text.AsSpan().IndexOfAnyInRange('\0', '\x1F') < 0
+        ? text
+        : string.Create(text.Length, text, static (span, from) =>
+        {
+            for (int i = 0; i < span.Length; i++)
+            {
+                span[i] = char.IsControl(from[i]) ? ' ' : from[i];
+            }
+        });
 }

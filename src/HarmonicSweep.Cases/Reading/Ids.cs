@@ -44,6 +44,9 @@ internal static class Ids
     public const string NoTables = "HS041";
     public const string RepeatedOrder = "HS042";
     public const string FolderInUse = "HS043";
+    public const string NameCharacters = "HS044";
+    public const string RepeatedKey = "HS045";
+    public const string Unreadable = "HS046";
     public const string NoPcc = "HS101";
     public const string RatedAgainstNominal = "HS102";
     public const string Sides = "HS103";
@@ -59,4 +62,7 @@ internal static class Ids
     public const string LooksLikeFraction = "HS113";
     public const string ShortCircuit = "HS114";
     public const string UnusedSpectrum = "HS115";
+    public const string LetterCase = "HS116";
+    public const string NoEffect = "HS117";
+    public const string RowOrComment = "HS118";
 }

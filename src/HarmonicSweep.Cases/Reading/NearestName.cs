@@ -3,16 +3,24 @@ namespace HarmonicSweep.Cases.Reading;
 /// <summary>The known name a mistyped one most likely stands for.</summary>
 public static class NearestName
 {
+    /// <summary>Words longer than this are no slip of the pen.</summary>
+    private const int Longest = 100;
+
     /// <summary>
-    /// The candidate at the smallest edit distance (Levenshtein 1966), letter case left out; null when none is within a third of
-    /// the length.
+    /// The candidate at the smallest edit distance (Levenshtein 1966), letter case left out; else one that begins with
+    /// the word; null when none is within a third of the length either.
     /// </summary>
     public static string? Of(string word, IEnumerable<string> candidates)
     {
+        if (word.Length > Longest)
+        {
+            return null;
+        }
+
         string lower = word.ToLowerInvariant();
         string? best = null;
         int least = Math.Max(2, word.Length / 3) + 1;
-        foreach (string candidate in candidates)
+        foreach (string candidate in candidates.Where(c => Math.Abs(c.Length - word.Length) < least))
         {
             int distance = Distance(lower, candidate.ToLowerInvariant());
             if (distance < least)
@@ -22,7 +30,8 @@ public static class NearestName
             }
         }
 
-        return best;
+        // or a word left unfinished: efficiency for efficiency_percent
+        return best ?? (lower.Length < 3 ? null : candidates.FirstOrDefault(c => c.StartsWith(lower, StringComparison.OrdinalIgnoreCase)));
     }
 
     /// <summary>A remedy that begins with the suggestion, when there is one.</summary>

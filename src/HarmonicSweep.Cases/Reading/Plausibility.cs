@@ -17,6 +17,9 @@ internal static class Plausibility
     /// <summary>A rating at any voltage above this, MVA, is more likely kVA.</summary>
     private const double LargestMva = 400;
 
+    /// <summary>A generator above this, MVA, is more likely kVA.</summary>
+    private const double LargestGeneratorMva = 400;
+
     /// <summary>Power at low voltage above this, kW, is more likely W.</summary>
     private const double LargestLowVoltageKw = 10_000;
 
@@ -51,6 +54,17 @@ internal static class Plausibility
         }
     }
 
+    public static void GeneratorRating(Row row)
+    {
+        double rated = row.Number("rated_mva");
+        if (rated > LargestGeneratorMva)
+        {
+            row.Warning(
+                Ids.LooksLikeKva, "rated_mva", $"{row.Name}: {rated.Plain()} MVA is large for a generator of a plant; it looks like kVA.",
+                $"write {(rated / 1000).Plain()} if {rated.Plain()} kVA is meant.");
+        }
+    }
+
     public static void XOverR(Row row, string column, double value, double least, double most)
     {
         if (row.Has(column) && (value < least || value > most))
@@ -74,7 +88,7 @@ internal static class Plausibility
     {
         if (mva is < 1 or > 200_000)
         {
-            row.Warning(Ids.ShortCircuit, "sc_mva_max", $"{row.Name}: a short-circuit power of {mva.ToString("G5", System.Globalization.CultureInfo.InvariantCulture)} MVA is outside the usual 1 to 200000.", "check that it is MVA (or kA) and not kVA, A or ohm.");
+            row.Warning(Ids.ShortCircuit, row.Has("sc_ka_max") ? "sc_ka_max" : "sc_mva_max", $"{row.Name}: a short-circuit power of {mva.Short()} MVA is outside the usual 1 to 200000.", "check that it is MVA (or kA) and not kVA, A or ohm.");
         }
     }
 
@@ -107,10 +121,24 @@ internal static class Plausibility
         }
 
         double delivered = ratedKvar * Math.Pow(nominalKv / ratedKv, 2) / (1 - detuningPercent / 100);
-        string kvar = delivered.ToString("G5", System.Globalization.CultureInfo.InvariantCulture);
+        string kvar = delivered.Short();
         row.Warning(
             Ids.BankVoltage, "rated_kv", $"{row.Name}: {ratedKvar.Plain()} kvar at {ratedKv.Plain()} kV delivers {kvar} kvar at the bus's {nominalKv.Plain()} kV.",
             "nothing needs mending if rated_kvar is that at rated_kv; else convert it.");
+    }
+
+    public static void FilterVoltage(Row row, double ratedKv, double nominalKv)
+    {
+        if (ratedKv == nominalKv)
+        {
+            return;
+        }
+
+        double kvar = row.Number("rated_kvar");
+        string atNominal = (kvar * Math.Pow(nominalKv / ratedKv, 2)).Short();
+        row.Warning(
+            Ids.BankVoltage, "rated_kv", $"{row.Name}: {kvar.Plain()} kvar of capacitors at {ratedKv.Plain()} kV are {atNominal} kvar at the bus's {nominalKv.Plain()} kV.",
+            "nothing needs mending if rated_kvar is that of the capacitors at rated_kv; else convert it.");
     }
 
     public static void BusVoltage(Row row)

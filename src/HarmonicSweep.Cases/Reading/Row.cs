@@ -27,6 +27,9 @@ internal sealed class Row
     /// <summary>File and line.</summary>
     public SourceLocation Location { get; }
 
+    /// <summary>Whether a comma in its numbers is a decimal mark.</summary>
+    public bool DecimalCommas { get; init; }
+
     /// <summary>Where complaints go.</summary>
     public FindingList Findings { get; }
 
@@ -41,6 +44,9 @@ internal sealed class Row
 
     /// <summary>Whether the cell has something in it.</summary>
     public bool Has(string column) => Text(column).Length > 0;
+
+    /// <summary>Whether its table may have such a column.</summary>
+    public bool HasColumn(string column) => _table.Find(column) is not null;
 
     /// <summary>Number of a cell that is required.</summary>
     public double Number(string column) => _numbers[column];
@@ -86,6 +92,10 @@ internal sealed class Row
     /// <summary>Adds a warning at a column of this row.</summary>
     public void Warning(string id, string column, string message, string remedy) =>
         Findings.Warning(id, Location.At(column), message, remedy);
+
+    /// <summary>Adds a note at a column of this row.</summary>
+    public void Note(string id, string column, string message, string remedy) =>
+        Findings.Note(id, Location.At(column), message, remedy);
 
     /// <summary>Whether exactly one of two columns is filled; a finding when not.</summary>
     public bool ExactlyOne(string first, string second)

@@ -12,10 +12,9 @@ internal static class StateReader
     /// <summary>The states in the order of their first row, base first.</summary>
     /// <param name="rows">Rows of states.csv.</param>
     /// <param name="elements">Elements that were built.</param>
-    /// <param name="names">Every name of the case, those of rows with errors included, so that one mistake is not reported twice.</param>
-    /// <param name="busNames">Names of buses.</param>
+    /// <param name="tables">Knows every name of the case, those of rows with errors included, so that one mistake is not reported twice.</param>
     public static List<OperatingState> Read(
-        IReadOnlyList<Row> rows, IReadOnlyDictionary<string, PlantElement> elements, IReadOnlyCollection<string> names, IReadOnlySet<string> busNames)
+        IReadOnlyList<Row> rows, IReadOnlyDictionary<string, PlantElement> elements, TableReader tables)
     {
         var states = new List<OperatingState> { OperatingState.Base };
         foreach (IGrouping<string, Row> group in rows.GroupBy(r => r.Text("state")))
@@ -30,7 +29,7 @@ internal static class StateReader
             var settings = new List<StateSetting>();
             foreach (Row row in group)
             {
-                if (Setting(row, elements, names, busNames) is not { } setting)
+                if (Setting(row, elements, tables) is not { } setting)
                 {
                     continue;
                 }
@@ -51,18 +50,20 @@ internal static class StateReader
     }
 
     private static StateSetting? Setting(
-        Row row, IReadOnlyDictionary<string, PlantElement> elements, IReadOnlyCollection<string> names, IReadOnlySet<string> busNames)
+        Row row, IReadOnlyDictionary<string, PlantElement> elements, TableReader tables)
     {
         string name = row.Text("element");
         if (!elements.TryGetValue(name, out PlantElement? element))
         {
-            if (busNames.Contains(name))
+            if (tables.BusNames.Contains(name))
             {
                 row.Error(Ids.UnknownElement, "element", $"'{name}' is a bus; expected an element (a bus goes out with what connects it).", "name the coupler, transformer or line that connects it.");
             }
-            else if (!names.Contains(name))
+            else if (!tables.Names.ContainsKey(name) && tables.Incomplete.Count == 0)
             {
-                row.Error(Ids.UnknownElement, "element", $"'{name}' is no element of the plant.", NearestName.Suggest(name, names.Where(n => !busNames.Contains(n)), "add it to its table, or correct the name."));
+                row.Error(
+                    Ids.UnknownElement, "element", $"'{name}' is no element; expected the name of an element of the plant.",
+                    NearestName.Suggest(name, tables.Names.Keys.Where(n => !tables.BusNames.Contains(n)), "add it to its table, or correct the name."));
             }
 
             return null;
@@ -77,7 +78,8 @@ internal static class StateReader
         int equals = text.IndexOf('=');
         string key = equals < 0 ? text : text[..equals];
         string value = equals < 0 ? "" : text[(equals + 1)..];
-        double? number = double.TryParse(value.Replace(',', '.'), NumberStyles.Float, CultureInfo.InvariantCulture, out double n) && double.IsFinite(n) ? n : null;
+        double? number = double.TryParse(row.DecimalCommas ? value.Replace(',', '.') : value, NumberStyles.Float, CultureInfo.InvariantCulture, out double n)
+            && NumberSize.Fits(n) && !NumberSize.Vanished(value, n) ? n : null;
         switch (key, element)
         {
             case ("steps", CapacitorBank bank):
@@ -94,11 +96,11 @@ internal static class StateReader
                 return number is >= 0 and <= 300 ? new LoadingSetting(name, number.Value) : OutOfRange(row, "a number from 0 to 300 in percent");
             case ("steps" or "sc" or "tap" or "loading", _):
                 row.Error(
-                    Ids.SettingKind, "setting", $"'{row.Text("setting")}' does not apply to {name}; expected {Legal(element)}.", "correct the setting or the element.");
+                    Ids.SettingKind, "setting", $"'{row.Text("setting").Shown()}' does not apply to {name}; expected {Legal(element)}.", "correct the setting or the element.");
                 return null;
             default:
                 row.Error(
-                    Ids.UnknownSetting, "setting", $"setting '{row.Text("setting")}' is not known; expected {Legal(element)}.",
+                    Ids.UnknownSetting, "setting", $"setting '{row.Text("setting").Shown()}' is not known; expected {Legal(element)}.",
                     NearestName.Suggest(key, ["in", "out", "steps=", "sc=", "tap=", "loading="], $"write for example {string.Join(", ", _settings)}."));
                 return null;
         }
@@ -115,7 +117,7 @@ internal static class StateReader
 
     private static StateSetting? OutOfRange(Row row, string expected)
     {
-        row.Error(Ids.OutOfRange, "setting", $"setting is '{row.Text("setting")}'; expected {expected}.", "correct the number.");
+        row.Error(Ids.OutOfRange, "setting", $"setting is '{row.Text("setting").Shown()}'; expected {expected}.", "correct the number.");
         return null;
     }
 }

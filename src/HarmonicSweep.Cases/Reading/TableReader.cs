@@ -1,4 +1,3 @@
-using System.Globalization;
 using HarmonicSweep.Cases.Schema;
 using HarmonicSweep.Network;
 
@@ -7,78 +6,65 @@ namespace HarmonicSweep.Cases.Reading;
 /// <summary>Checks every cell of a table against its schema and hands on the rows that are sound.</summary>
 internal sealed class TableReader(FindingList findings, List<AssumedValue> assumed, List<SourceEntry> sources)
 {
+    private readonly Dictionary<string, string> _spellings = new(StringComparer.OrdinalIgnoreCase);
+    private readonly Dictionary<string, string> _suggestions = new(StringComparer.Ordinal);
+
     /// <summary>Bus names, known once buses.csv is read; empty before.</summary>
     public HashSet<string> BusNames { get; } = new(StringComparer.Ordinal);
 
     /// <summary>Every name taken so far, with where.</summary>
     public Dictionary<string, SourceLocation> Names { get; } = new(StringComparer.Ordinal);
 
+    /// <summary>Files that could not be read in full: a name that is not found may stand there, so it is not complained of.</summary>
+    public HashSet<string> Incomplete { get; } = new(StringComparer.Ordinal);
+
+    /// <summary>File and first cell of rows that were left out for their errors.</summary>
+    public HashSet<(string File, string Name)> LeftOut { get; } = [];
+
     /// <summary>Reads the rows of a table; a row with an error is left out, but its name is known.</summary>
     public List<Row> Read(Table table, CsvFile csv)
     {
         var rows = new List<Row>();
-        if (csv.Header is null || ReadHeader(table, csv) is not { } columns)
+        HeaderRow? header = csv.Header is null ? null : HeaderRow.Read(table, csv, findings);
+        int naming = header?.IndexOf(table.Columns[0].Name) ?? -1;
+        if (csv.Incomplete || (csv.Header is not null && naming < 0))
+        {
+            Incomplete.Add(table.File);
+        }
+
+        if (header is null)
         {
             return rows;
         }
 
         var marks = new DecimalMarks(csv.File, csv.DecimalCommas, findings);
-        foreach (CsvRecord record in csv.WellFormed(findings))
+        foreach (CsvRecord record in csv.Records)
         {
             int errors = findings.ErrorCount;
-            Row row = ReadRow(table, csv, columns, record, marks);
-            if (findings.ErrorCount == errors)
+            if (!csv.FitsHeader(record, findings))
             {
-                rows.Add(row);
-            }
-        }
-
-        return rows;
-    }
-
-    /// <summary>Column of each header cell; null when the header itself is wrong beyond reading the rows.</summary>
-    private Column?[]? ReadHeader(Table table, CsvFile csv)
-    {
-        string[] header = [.. csv.Header!.Cells.Select(c => c.ToLowerInvariant())];
-        var place = new SourceLocation(csv.File, csv.Header.Line);
-        var known = table.Columns.Select(c => c.Name).Append(Table.SourceColumn).ToList();
-        int errors = findings.ErrorCount;
-        var columns = new Column?[header.Length];
-        var seen = new HashSet<string>(StringComparer.Ordinal);
-        for (int i = 0; i < header.Length; i++)
-        {
-            if (header[i].Length == 0)
-            {
-                if (csv.Records.Any(r => r.Cells.Length > i && r.Cells[i].Length > 0))
+                string name = naming >= 0 && naming < record.Cells.Length ? record.Cells[naming] : "";
+                LeftOut.Add((table.File, name));
+                if (table.Columns[0].Kind == CellKind.Name)
                 {
-                    findings.Error(Ids.UnknownColumn, place, $"column {(i + 1).ToString(CultureInfo.InvariantCulture)} has cells but no header.", "name the column, or clear it.");
+                    Names.TryAdd(name, new SourceLocation(csv.File, record.Line));
                 }
 
                 continue;
             }
 
-            if (!seen.Add(header[i]))
+            Row row = ReadRow(table, csv, header.Columns, record, marks);
+            if (header.Sound && findings.ErrorCount == errors)
             {
-                findings.Error(Ids.RepeatedColumn, place.At(header[i]), $"column {header[i]} stands twice in the header.", "keep one of them.");
+                rows.Add(row);
             }
-
-            columns[i] = header[i] == Table.SourceColumn ? new Column { Name = Table.SourceColumn, Kind = CellKind.Text } : table.Find(header[i]);
-            if (columns[i] is null)
+            else
             {
-                findings.Error(
-                    Ids.UnknownColumn, place.At(header[i]), $"unknown column '{csv.Header.Cells[i]}'; known are {string.Join(", ", known)}.",
-                    NearestName.Suggest(header[i], known, "remove the column (remarks may stand in a column named source or in # lines)."));
+                LeftOut.Add((table.File, row.Name));
             }
         }
 
-        foreach (Column column in table.Columns.Where(c => c.Required && !seen.Contains(c.Name)))
-        {
-            findings.Error(
-                Ids.MissingColumn, place.At(column.Name), $"required column {column.Name} is missing; expected {column.Expected} in every row.",
-                "add the column to the header and fill it in.");
-        }
-
-        return findings.ErrorCount > errors && Array.TrueForAll(columns, c => c is null) ? null : columns;
+        return rows;
     }
 
     private Row ReadRow(Table table, CsvFile csv, Column?[] columns, CsvRecord record, DecimalMarks marks)
@@ -94,8 +80,8 @@ internal sealed class TableReader(FindingList findings, List<AssumedValue> assum
             }
         }
 
-        var row = new Row(table, location, text, numbers, findings, assumed);
-        string called = table.Columns[0].Kind == CellKind.Name && row.Name.Length > 0 ? row.Name : "the row";
+        var row = new Row(table, location, text, numbers, findings, assumed) { DecimalCommas = csv.DecimalCommas };
+        string called = table.Columns[0].Kind == CellKind.Name && row.Name.Length > 0 ? row.Name.Shown() + ": " : "";
         foreach (Column? column in columns)
         {
             if (column is not null)
@@ -119,7 +105,7 @@ internal sealed class TableReader(FindingList findings, List<AssumedValue> assum
         {
             if (column.Required)
             {
-                row.Error(Ids.BlankCell, column.Name, $"{called}: {column.Name} is blank; expected {column.Expected}.", "fill the cell in.");
+                row.Error(Ids.BlankCell, column.Name, $"{called}{column.Name} is blank; expected {column.Expected}.", "fill the cell in.");
             }
 
             return;
@@ -128,8 +114,14 @@ internal sealed class TableReader(FindingList findings, List<AssumedValue> assum
         if (column.Later)
         {
             row.Error(
-                Ids.LaterModel, column.Name, $"{called}: {column.Name} is '{cell}', but its model is not in this version.",
+                Ids.LaterModel, column.Name, $"{called}{column.Name} is '{cell.Shown()}', but its model is not in this version; expected a blank cell.",
                 "leave the cell blank; the results then hold without it.");
+            return;
+        }
+
+        if (column.IsName && Label.Fault(cell) is { } fault)
+        {
+            row.Error(Ids.NameCharacters, column.Name, $"{column.Name} '{cell.Shown()}' {fault}; expected {Label.Expected}.", "type the name anew, the same in every table.");
             return;
         }
 
@@ -139,20 +131,18 @@ internal sealed class TableReader(FindingList findings, List<AssumedValue> assum
                 CheckName(column, row, cell);
                 break;
             case CellKind.Bus when !BusNames.Contains(cell):
-                row.Error(
-                    Ids.UnknownBus, column.Name, $"{called}: {column.Name} '{cell}' is no bus; expected {column.Expected}.",
-                    NearestName.Suggest(cell, BusNames, "add the bus to buses.csv."));
+                UnknownBus(column, row, called, cell);
                 break;
             case CellKind.Number or CellKind.Whole:
                 CheckNumber(column, row, called, cell, numbers, marks);
                 break;
             case CellKind.YesNo when YesNo.Parse(cell) is null:
-                row.Error(Ids.UnknownWord, column.Name, $"{called}: {column.Name} is '{cell}'; expected {column.Expected}.", "write yes or no.");
+                row.Error(Ids.UnknownWord, column.Name, $"{called}{column.Name} is '{cell.Shown()}'; expected {column.Expected}.", "write yes or no.");
                 break;
             case CellKind.Word when !column.Words.Contains(cell.ToLowerInvariant()):
                 row.Error(
-                    Ids.UnknownWord, column.Name, $"{called}: {column.Name} is '{cell}'; expected {column.Expected}.",
-                    NearestName.Suggest(cell, column.Words, "write one of those words, or leave the cell blank for the default."));
+                    Ids.UnknownWord, column.Name, $"{called}{column.Name} is '{cell.Shown()}'; expected {column.Expected}.",
+                    NearestName.Suggest(cell, column.Words, column.Required ? "write one of those words." : "write one of those words, or leave the cell blank for the default."));
                 break;
         }
     }
@@ -165,17 +155,41 @@ internal sealed class TableReader(FindingList findings, List<AssumedValue> assum
                 Ids.RepeatedName, column.Name, $"the name '{cell}' is already taken at {Names[cell]}; expected a name that nothing else bears.",
                 "rename one of the two; buses and elements share their names.");
         }
+        else if (!_spellings.TryAdd(cell, cell))
+        {
+            string other = _spellings[cell];
+            row.Warning(
+                Ids.LetterCase, column.Name, $"the names '{cell}' and '{other}' (at {Names[other]}) differ in capital letters only; they are two things.",
+                "rename one of the two, or spell both alike if they are one thing.");
+        }
+    }
+
+    private void UnknownBus(Column column, Row row, string called, string cell)
+    {
+        // without any bus, or with rows of buses.csv lost, that alone is the complaint
+        if (BusNames.Count == 0 || Incomplete.Contains(Tables.Buses.File))
+        {
+            return;
+        }
+
+        if (!_suggestions.TryGetValue(cell, out string? remedy))
+        {
+            _suggestions[cell] = remedy = NearestName.Suggest(cell, BusNames, "add the bus to buses.csv.");
+        }
+
+        string found = Names.ContainsKey(cell) ? "is an element" : "is no bus";
+        row.Error(Ids.UnknownBus, column.Name, $"{called}{column.Name} '{cell}' {found}; expected {column.Expected}.", remedy);
     }
 
     private static void CheckNumber(
         Column column, Row row, string called, string cell, Dictionary<string, double> numbers, DecimalMarks marks)
     {
-        if (marks.Parse(cell, row.Location.At(column.Name), out bool complained) is not { } value)
+        if (marks.Parse(cell, row.Location.At(column.Name), called, out bool complained) is not { } value)
         {
             if (!complained)
             {
                 row.Error(
-                    Ids.NotANumber, column.Name, $"{called}: {column.Name} is '{cell}'; expected {column.Expected}.",
+                    Ids.NotANumber, column.Name, $"{called}{column.Name} is '{cell.Shown()}'; expected {column.Expected}.",
                     "write digits with a decimal point, without units or thousands separators.");
             }
 
@@ -183,20 +197,25 @@ internal sealed class TableReader(FindingList findings, List<AssumedValue> assum
         }
 
         bool low = column.Above ? value <= column.Least : value < column.Least;
-        if (low || value > column.Most || (column.Kind == CellKind.Whole && value != Math.Floor(value)))
+        bool fraction = column.Kind == CellKind.Whole && value != Math.Floor(value);
+        bool size = !NumberSize.Fits(value) || NumberSize.Vanished(cell, value);
+        if (low || value > column.Most || fraction || size)
         {
+            string sized = size && !low && value <= column.Most ? $" ({NumberSize.Words} in size)" : "";
             row.Error(
-                Ids.OutOfRange, column.Name, $"{called}: {column.Name} is {cell}; expected {column.Expected}.", RangeRemedy(column, value));
+                Ids.OutOfRange, column.Name, $"{called}{column.Name} is {cell.Shown()}; expected {column.Expected}{sized}.", RangeRemedy(column, value));
             return;
         }
 
-        numbers[column.Name] = value;
+        // adding 0 turns a minus zero into zero
+        numbers[column.Name] = value + 0.0;
     }
 
     private static string RangeRemedy(Column column, double value) => (column.Most, column.Unit) switch
     {
-        (1, "") when value is > 1 and <= 100 => $"write {(value / 100).Plain()} if {value.Plain()} percent is meant.",
+        (1, "") when value is >= 5 and <= 100 => $"write {(value / 100).Plain()} if {value.Plain()} percent is meant.",
         _ when value < 0 && column.Least >= 0 => "remove the minus sign, or check which column the value belongs to.",
+        (_, "") => "correct the value, or check which column it belongs to.",
         _ => "correct the value, or check its unit.",
     };
 }

@@ -58,6 +58,9 @@ internal sealed record Column
     /// <summary>Whether its model comes with a later version: a cell that is not blank is refused.</summary>
     public bool Later { get; init; }
 
+    /// <summary>Whether its cells name something, so that they may hold visible characters only.</summary>
+    public bool IsName => Kind is CellKind.Name or CellKind.Bus || (Kind == CellKind.Text && Required);
+
     /// <summary>What is expected, for messages: <c>a number above 0 in km</c>.</summary>
     public string Expected => Kind switch
     {
@@ -66,7 +69,7 @@ internal sealed record Column
         CellKind.Word => "one of " + string.Join(", ", Words),
         CellKind.Bus => "the name of a bus of buses.csv",
         CellKind.Name => "a name that nothing else bears",
-        _ => "a text",
+        _ => Required ? Comment : "a text",
     };
 
     private string Range => (double.IsFinite(Least), double.IsFinite(Most)) switch
@@ -139,4 +142,8 @@ internal static class PlainNumber
 {
     /// <summary>Shortest text that reads back as the same number, invariant culture.</summary>
     public static string Plain(this double value) => value.ToString(System.Globalization.CultureInfo.InvariantCulture);
+
+    /// <summary>A computed number, rounded for reading.</summary>
+    public static string Short(this double value) => value.ToString(
+        Math.Abs(value) switch { >= 1000 => "0", >= 1 => "0.##", _ => "G4" }, System.Globalization.CultureInfo.InvariantCulture);
 }

@@ -147,7 +147,7 @@ internal static class Tables
     /// <summary>spectra.csv.</summary>
     public static readonly Table Spectra = new(
         "spectra.csv", "one line of a spectrum",
-        Column.Free("spectrum", required: true),
+        Column.Free("spectrum", "the name of the spectrum", required: true),
         Column.Between("order", "", 0, 1000, "any real number: interharmonics allowed", required: true, above: true),
         Column.NotNegative("percent", "percent", "of the fundamental (converters) or of nominal voltage (background)", required: true),
         Column.Any("angle_deg", "degrees", "blank = 0"))
@@ -170,8 +170,8 @@ internal static class Tables
     /// <summary>states.csv.</summary>
     public static readonly Table States = new(
         "states.csv", "one setting of an operating state; what a state does not name stays as drawn",
-        Column.Free("state", "base and all are reserved", required: true),
-        Column.Free("element", "any element", required: true),
+        Column.Free("state", "a name of the state other than base and all", required: true),
+        Column.Free("element", "the name of an element of the plant", required: true),
         Column.Free("setting", "in, out, steps=2, sc=min, sc=max, sc=250, tap=-2.5 or loading=60", required: true))
     { Example = "weak grid,GRID,sc=min" };
 
