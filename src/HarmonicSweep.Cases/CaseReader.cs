@@ -177,7 +177,7 @@ public sealed class CaseReader
             // where rows of buses.csv were lost, that is what has to be mended
             if (!tables.Incomplete.Contains(Tables.Buses.File))
             {
-                _findings.Error(Ids.NoBuses, new SourceLocation(Tables.Buses.File, 0), "the plant has no bus.", "list the buses in buses.csv: name and nominal_kv.");
+                _findings.Error(Ids.NoBuses, new SourceLocation(Tables.Buses.File, 0), "the plant has no bus; expected at least one.", "list the buses in buses.csv: name and nominal_kv.");
             }
 
             return;

@@ -65,8 +65,6 @@ internal static class StateReader
                     Ids.UnknownElement, "element", $"'{name}' is no element; expected the name of an element of the plant.",
                     NearestName.Suggest(name, tables.Names.Keys.Where(n => !tables.BusNames.Contains(n)), "add it to its table, or correct the name."));
             }
-
-            return null;
         }
 
         string text = row.Text("setting").ToLowerInvariant().Replace(" ", "", StringComparison.Ordinal);
@@ -80,6 +78,11 @@ internal static class StateReader
         string value = equals < 0 ? "" : text[(equals + 1)..];
         double? number = double.TryParse(row.DecimalCommas ? value.Replace(',', '.') : value, NumberStyles.Float, CultureInfo.InvariantCulture, out double n)
             && NumberSize.Fits(n) && !NumberSize.Vanished(value, n) ? n : null;
+        if (element is null && key is ("steps" or "sc" or "tap" or "loading"))
+        {
+            return null;
+        }
+
         switch (key, element)
         {
             case ("steps", CapacitorBank bank):
@@ -106,8 +109,9 @@ internal static class StateReader
         }
     }
 
-    private static string Legal(PlantElement element) => "in, out" + element switch
+    private static string Legal(PlantElement? element) => "in, out" + element switch
     {
+        null => ", steps=NUMBER, sc=MVA, tap=PERCENT or loading=PERCENT",
         CapacitorBank => " or steps=NUMBER",
         Supply => ", sc=min, sc=max or sc=MVA",
         Transformer => " or tap=PERCENT",

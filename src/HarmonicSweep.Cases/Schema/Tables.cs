@@ -87,7 +87,7 @@ internal static class Tables
         Column.Positive("l_mh", "mH", "instead of x_ohm"),
         Column.Positive("q_factor", "", "X/R at the fundamental", required: true),
         Column.Free("resistance_law", "constant (blank), sqrt, line, cable or power:a;b;c"))
-    { Example = "R1,MAIN,DRIVE,0.2,,40," };
+    { Example = "R1,MAIN,DRIVES,0.2,,40," };
 
     /// <summary>loads.csv.</summary>
     public static readonly Table Loads = new(
@@ -113,7 +113,7 @@ internal static class Tables
         Column.Between("locked_rotor_pu", "pu", 0, 20, "current, blank = 6", above: true),
         Column.Between("locked_rotor_pf", "", 0, 1, "blank = 0.2", above: true),
         Column.Count("count", 1, "equal motors, blank = 1"))
-    { Example = "PUMPS,LV,55,,94,0.86,80,6.5,0.25,3" };
+    { Example = "PUMP-MOTORS,LV,55,,94,0.86,80,6.5,0.25,3" };
 
     /// <summary>capacitors.csv.</summary>
     public static readonly Table Capacitors = new(

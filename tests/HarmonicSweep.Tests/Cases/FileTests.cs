@@ -11,16 +11,16 @@ public class FileTests
             "case.toml: error HS002: there is no case.toml in 'FOLDER'; expected at least title and frequency_hz. Fix: write one, or start from the templates of: hsweep new FOLDER"
         },
         { "no buses", p => p.Without("buses.csv"),
-            "buses.csv: error HS039: the plant has no bus. Fix: list the buses in buses.csv: name and nominal_kv."
+            "buses.csv: error HS039: the plant has no bus; expected at least one. Fix: list the buses in buses.csv: name and nominal_kv."
         },
         { "buses header only", p => p.With("buses.csv", "bus,nominal_kv"),
-            "buses.csv: error HS039: the plant has no bus. Fix: list the buses in buses.csv: name and nominal_kv."
+            "buses.csv: error HS039: the plant has no bus; expected at least one. Fix: list the buses in buses.csv: name and nominal_kv."
         },
         { "buses empty", p => p.With("buses.csv", ""),
-            "buses.csv: error HS039: the plant has no bus. Fix: list the buses in buses.csv: name and nominal_kv."
+            "buses.csv: error HS039: the plant has no bus; expected at least one. Fix: list the buses in buses.csv: name and nominal_kv."
         },
         { "buses comments only", p => p.With("buses.csv", "# none\n\n# yet\n"),
-            "buses.csv: error HS039: the plant has no bus. Fix: list the buses in buses.csv: name and nominal_kv."
+            "buses.csv: error HS039: the plant has no bus; expected at least one. Fix: list the buses in buses.csv: name and nominal_kv."
         },
         { "no source", p => p.Without("supplies.csv").Without("generators.csv").Without("states.csv").With("spectra.csv", "spectrum,order,percent,angle_deg\nsix pulse,1,100,0\nsix pulse,5,20,180"),
             "supplies.csv: error HS040: the plant has neither a supply nor a generator, so no bus is live. Fix: add the utility in-feed to supplies.csv."

@@ -47,16 +47,16 @@ public class NameTests
             "loads.csv(2,name): error HS044: name 'LIG HTS' has a control character in it; expected a name of at most 100 visible characters and plain blanks. Fix: type the name anew, the same in every table."
         },
         { "invisible character in a name", p => p.Replace("loads.csv", "LIGHTS,LV", "LIGHTS,L\u200BV"),
-            "loads.csv(2,bus): error HS044: bus 'L​V' has an invisible character in it (U+200B); expected a name of at most 100 visible characters and plain blanks. Fix: type the name anew, the same in every table."
+            "loads.csv(2,bus): error HS044: bus 'L\u200BV' has an invisible character in it (U+200B); expected a name of at most 100 visible characters and plain blanks. Fix: type the name anew, the same in every table."
         },
         { "no-break space in a name", p => p.Replace("loads.csv", "LIGHTS", "LIG\u00A0HTS"),
             "loads.csv(2,name): error HS044: name 'LIG\u00a0HTS' has a blank of another kind in it (U+00A0); expected a name of at most 100 visible characters and plain blanks. Fix: type the name anew, the same in every table."
         },
         { "accent apart from its letter", p => p.Replace("loads.csv", "LIGHTS", "E\u0301CLAIRAGE"),
-            "loads.csv(2,name): error HS044: name 'ÉCLAIRAGE' has an accent stored apart from its letter (U+0301); expected a name of at most 100 visible characters and plain blanks. Fix: type the name anew, the same in every table."
+            "loads.csv(2,name): error HS044: name 'E\u0301CLAIRAGE' has an accent stored apart from its letter (U+0301); expected a name of at most 100 visible characters and plain blanks. Fix: type the name anew, the same in every table."
         },
         { "damaged letter", p => p.Replace("loads.csv", "LIGHTS", "S\uFFFDGE"),
-            "loads.csv(2,name): error HS044: name 'S�GE' has a damaged character in it (U+FFFD); expected a name of at most 100 visible characters and plain blanks. Fix: type the name anew, the same in every table."
+            "loads.csv(2,name): error HS044: name 'S\uFFFDGE' has a damaged character in it (U+FFFD); expected a name of at most 100 visible characters and plain blanks. Fix: type the name anew, the same in every table."
         },
         { "endless name", p => p.Replace("loads.csv", "LIGHTS", new string('x', 1_000_000)),
             "loads.csv(2,name): error HS044: name 'xxxxxxxxxxxxxxxxxxxxxxxxxxxxxxxxxxxxxxxx...' has 1000000 characters; expected a name of at most 100 visible characters and plain blanks. Fix: type the name anew, the same in every table."

@@ -29,10 +29,10 @@ public class NumberTests
             "loads.csv(2,p_kw): error HS010: LIGHTS: p_kw is 'Infinity'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators."
         },
         { "infinity sign", p => p.Replace("loads.csv", "350", "\u221E"),
-            "loads.csv(2,p_kw): error HS010: LIGHTS: p_kw is '∞'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators."
+            "loads.csv(2,p_kw): error HS010: LIGHTS: p_kw is '\u221E'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators."
         },
         { "full-width digits", p => p.Replace("loads.csv", "350", "\uFF11\uFF12"),
-            "loads.csv(2,p_kw): error HS010: LIGHTS: p_kw is '１２'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators."
+            "loads.csv(2,p_kw): error HS010: LIGHTS: p_kw is '\uFF11\uFF12'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators."
         },
         { "hexadecimal", p => p.Replace("loads.csv", "350", "0x10"),
             "loads.csv(2,p_kw): error HS010: LIGHTS: p_kw is '0x10'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators."
@@ -41,13 +41,13 @@ public class NumberTests
             "loads.csv(2,p_kw): error HS010: LIGHTS: p_kw is '1 350'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators."
         },
         { "narrow blank for thousands", p => p.Replace("loads.csv", "350", "1\u202F350"),
-            "loads.csv(2,p_kw): error HS010: LIGHTS: p_kw is '1 350'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators."
+            "loads.csv(2,p_kw): error HS010: LIGHTS: p_kw is '1\u202F350'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators."
         },
         { "apostrophe for thousands", p => p.Replace("loads.csv", "350", "1'350"),
             "loads.csv(2,p_kw): error HS010: LIGHTS: p_kw is '1'350'; expected a number of at least 0 in kW. Fix: write digits with a decimal point, without units or thousands separators."
         },
         { "minus sign of typography", p => p.Replace("supplies.csv", "GRID-BUS,1,0", "GRID-BUS,1,\u221230"),
-            "supplies.csv(2,angle_deg): error HS010: GRID: angle_deg is '−30'; expected a number in degrees. Fix: write digits with a decimal point, without units or thousands separators."
+            "supplies.csv(2,angle_deg): error HS010: GRID: angle_deg is '\u221230'; expected a number in degrees. Fix: write digits with a decimal point, without units or thousands separators."
         },
         { "percent sign", p => p.Replace("transformers.csv", "33,11,10,15", "33,11,10 %,15"),
             "transformers.csv(2,impedance_percent): error HS010: T1: impedance_percent is '10 %'; expected a number above 0 up to 100 in percent. Fix: write digits with a decimal point, without units or thousands separators."
