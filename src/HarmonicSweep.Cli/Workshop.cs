@@ -21,6 +21,9 @@ internal sealed partial record Workshop
     /// <summary>Writes the tables of a new case; the finding says why it was refused.</summary>
     public required Func<string, Finding?> NewCase { get; init; }
 
+    /// <summary>Gets the drawing library ready in the background.</summary>
+    public required Action WarmPlots { get; init; }
+
     /// <summary>Draws the plots of a result.</summary>
     public required DrawPlots DrawPlots { get; init; }
 

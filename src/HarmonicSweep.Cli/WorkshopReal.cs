@@ -13,6 +13,7 @@ internal sealed partial record Workshop
     {
         ReadCase = static folder => CaseReader.Read(folder),
         NewCase = static folder => CaseTemplate.Write(folder),
+        WarmPlots = static () => PictureBook.Warm(),
         DrawPlots = Draw,
         Check = static (request, progress, cancellation) => CheckStudy.Run(request, progress, cancellation),
         Impedance = static (request, progress, cancellation) => ImpedanceStudy.Run(request, progress, cancellation),
@@ -36,11 +37,23 @@ internal sealed partial record Workshop
     }
 
     /// <summary>
-    /// Every bus asked for; in the main job, where nobody asked, the PCC and the buses of banks and filters: the other buses
-    /// stand in the tables, and pictures take most of the time.
+    /// Every bus asked for (empty = all that have curves); in the main job, where nobody asked, the PCC and the buses of banks
+    /// and filters: the other buses stand in the tables, and pictures take most of the time.
     /// </summary>
-    private static IReadOnlyCollection<string> BusesWithPictures(StudyRequest request, StudyResult result) =>
-        request.Buses.Count > 0 || result.Screen is null
-            ? []
-            : [.. request.Plant.Elements.Where(e => e is CapacitorBank or Filter).Select(e => e.Terminals[0]).Append(request.Settings.PccBus ?? "").Distinct()];
+    private static HashSet<string> BusesWithPictures(StudyRequest request, StudyResult result)
+    {
+        var buses = new HashSet<string>(StringComparer.Ordinal);
+        if (request.Buses.Count > 0 || result.Screen is null)
+        {
+            return buses;
+        }
+
+        buses.UnionWith(request.Plant.Elements.Where(e => e is CapacitorBank or Filter).Select(e => e.Terminals[0]));
+        if (request.Settings.PccBus is { } pcc)
+        {
+            buses.Add(pcc);
+        }
+
+        return buses;
+    }
 }

@@ -78,13 +78,19 @@ internal static class Axes
         return ticks;
     }
 
-    /// <summary>Thin lines at the injected orders, their numbers above the panel when asked for.</summary>
-    public static void Injected(Plot plot, IReadOnlyList<double> orders, double from, double to, bool numbered)
+    /// <summary>Thin lines at the injected orders, their numbers above the panel when asked for; with a light rim on a shaded panel.</summary>
+    public static void Injected(Plot plot, IReadOnlyList<double> orders, double from, double to, bool numbered, bool shaded = false)
     {
         double[] inside = [.. orders.Where(h => h >= from && h <= to)];
         double lastNumber = double.NegativeInfinity;
         foreach (double order in inside.Length > MostInjected ? [] : inside)
         {
+            if (shaded)
+            {
+                // a rim that carries the line over dark shades
+                plot.Add.VerticalLine(order, 2.6f, Colors.White.WithAlpha(0.55));
+            }
+
             ScottPlot.Plottables.VerticalLine line = plot.Add.VerticalLine(order, 1, Look.InjectedOrder, LinePattern.Dotted);
             // numbers closer than this would touch
             if (numbered && order - lastNumber > (to - from) * 0.018)

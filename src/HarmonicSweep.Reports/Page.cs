@@ -19,21 +19,21 @@ internal sealed class Page(string title, string subtitle, IReadOnlyList<Panel> p
 
     private const float HeaderHeight = 54;
     private const float Margin = 14;
-    private const int PixelsPerUnit = 2;
+    private const float PixelsPerUnit = 1.5f;
 
     private float Height => HeaderHeight + panels.Sum(p => p.Height) + 4;
 
-    /// <summary>The picture as a PNG file of 1600 pixels width.</summary>
+    /// <summary>The picture as a PNG file of 1200 pixels width, 190 dots an inch at 16 cm.</summary>
     public byte[] ToPng()
     {
         var info = new SKImageInfo(
-            (int)Width * PixelsPerUnit, (int)MathF.Ceiling(Height) * PixelsPerUnit, SKColorType.Rgba8888, SKAlphaType.Opaque);
+            (int)(Width * PixelsPerUnit), (int)MathF.Ceiling(MathF.Ceiling(Height) * PixelsPerUnit), SKColorType.Rgba8888, SKAlphaType.Opaque);
         using SKSurface surface = SKSurface.Create(info) ?? throw new InvalidOperationException("There is no memory for the bitmap of a picture.");
         surface.Canvas.Scale(PixelsPerUnit);
         Draw(surface.Canvas);
         using SKPixmap pixels = surface.PeekPixels();
         // fast compression: half the time for a tenth more bytes
-        using SKData data = pixels.Encode(new SKPngEncoderOptions(SKPngEncoderFilterFlags.Sub, 4))
+        using SKData data = pixels.Encode(new SKPngEncoderOptions(SKPngEncoderFilterFlags.Sub, 3))
             ?? throw new InvalidOperationException("The picture could not be encoded.");
         return data.ToArray();
     }

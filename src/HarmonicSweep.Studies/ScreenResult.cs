@@ -16,6 +16,9 @@ public sealed record ScreenResult
 
     /// <summary>|Z| at a bank's bus over its positions: the data of the heat map.</summary>
     public required IReadOnlyList<PositionMap> Maps { get; init; }
+
+    /// <summary>Largest backward error of all solves of the screening.</summary>
+    public double WorstBackwardError { get; init; }
 }
 
 /// <summary>One bank at one position and one supply strength.</summary>

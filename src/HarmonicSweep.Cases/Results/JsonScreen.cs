@@ -10,6 +10,7 @@ internal static class JsonScreen
     {
         json.WriteStartObject("screen");
         json.Number("near_orders", screen.NearOrders);
+        json.Number("worst_backward_error", screen.WorstBackwardError);
         json.Objects("positions", screen.Positions, Position);
         json.Objects("worst", screen.Worst, static (j, w) =>
         {

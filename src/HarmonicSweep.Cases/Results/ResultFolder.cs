@@ -61,14 +61,22 @@ public sealed class ResultFolder : IDisposable
     }
 
     /// <summary>Writes the JSON document, which lists the files written so far, then moves everything into place.</summary>
+    /// <param name="caseFile">The case it was computed from.</param>
+    /// <param name="result">What was computed.</param>
+    /// <param name="version">Version of the program.</param>
+    /// <param name="finish">Returns when every other file is staged; called after the bulk of the document is written.</param>
     /// <returns>Names of the files, relative to the folder, in ordinal order; the document is one of them.</returns>
     /// <exception cref="IOException">A file cannot be written or moved.</exception>
-    public IReadOnlyList<string> Commit(CaseFile caseFile, StudyResult result, string version)
+    public IReadOnlyList<string> Commit(CaseFile caseFile, StudyResult result, string version, Action? finish = null)
     {
-        string[] files = StagedFiles();
+        string[] files = [];
         using (FileStream stream = File.Create(Path.Combine(StagingFolder, DocumentName)))
         {
-            ResultJson.Write(stream, caseFile, result, version, files);
+            ResultJson.Write(stream, caseFile, result, version, () =>
+            {
+                finish?.Invoke();
+                return files = [.. StagedFiles().Where(f => f != DocumentName)];
+            });
         }
 
         string[] stale = [.. FilesOfEarlierResult().Except(files, StringComparer.Ordinal)];

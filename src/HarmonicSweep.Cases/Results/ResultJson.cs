@@ -20,17 +20,17 @@ public static class ResultJson
     /// <param name="version">Version of the program.</param>
     /// <exception cref="IOException">The stream cannot be written.</exception>
     public static void Write(Stream stream, CaseFile caseFile, StudyResult result, string version) =>
-        Write(stream, caseFile, result, version, []);
+        Write(stream, caseFile, result, version, static () => []);
 
     /// <summary>Writes the whole result of a command, with the names of the files written beside it.</summary>
     /// <param name="stream">Receives UTF-8 without byte order mark; not closed.</param>
     /// <param name="caseFile">The case it was computed from.</param>
     /// <param name="result">What was computed.</param>
     /// <param name="version">Version of the program.</param>
-    /// <param name="files">Files beside the document, paths relative to it; empty when there are none.</param>
+    /// <param name="files">Gives the files beside the document, paths relative to it; asked last, so they may still be written meanwhile.</param>
     /// <exception cref="IOException">The stream cannot be written.</exception>
     public static void Write(
-        Stream stream, CaseFile caseFile, StudyResult result, string version, IReadOnlyList<string> files)
+        Stream stream, CaseFile caseFile, StudyResult result, string version, Func<IReadOnlyList<string>> files)
     {
         using var json = new Utf8JsonWriter(stream, Options);
         json.WriteStartObject();
@@ -65,7 +65,7 @@ public static class ResultJson
             j.WriteString("source", s.Source);
             WriteLocation(j, s.Location);
         });
-        json.Words("files", files);
+        json.Words("files", files());
         json.WriteEndObject();
     }
 

@@ -34,7 +34,7 @@ internal sealed class CommandOptions
     public Option<string[]> Buses { get; } = new("--bus")
     {
         HelpName = "name",
-        Description = "Bus to report; repeat for several. Default: the PCC and every bus with a bank, filter or converter (distortion: all).",
+        Description = "Bus to report; repeat for several. Default: the PCC and every bus with a bank, filter or converter (distortion, screen: all).",
     };
 
     public Option<string?> InjectedAt { get; } = new("--injected-at")

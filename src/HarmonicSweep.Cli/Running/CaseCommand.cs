@@ -30,10 +30,13 @@ internal sealed record CaseCommand(
         new(
             "screen", "Run every position of every bank at every supply strength; name those not to dwell on.",
             "hsweep screen cases/demo-plant --combinations", workshop.Screen, false,
-            [o.States, o.FromHz, o.ToHz, o.StepHz, o.Rule, o.Combinations, o.Near, o.Out, o.Format, o.Threads]),
+            [o.States, o.Buses, o.FromHz, o.ToHz, o.StepHz, o.Rule, o.Combinations, o.Near, o.Out, o.Format, o.Threads]),
         new(
             "study", "The main job: check, impedance, distortion and screen in every way the plant can be switched.",
             "hsweep study cases/demo-plant --out results", workshop.Main, true,
-            [o.States, o.Buses, o.FromHz, o.ToHz, o.StepHz, o.Rule, o.Combinations, o.Near, o.Out, o.Format, o.Threads]),
+            [
+                o.States, o.Buses, o.InjectedAt, o.Orders, o.FromHz, o.ToHz, o.StepHz, o.Sequence, o.Rule, o.Combinations, o.Near,
+                o.Out, o.Format, o.Threads,
+            ]),
     ];
 }

@@ -17,6 +17,11 @@ internal sealed class CaseRun(CaseCommand command, CommandOptions options, Parse
     /// <returns>An <see cref="ExitCode"/>.</returns>
     public int Run(CancellationToken cancellation)
     {
+        if (_out is not null)
+        {
+            workshop.WarmPlots();
+        }
+
         (CaseFile? read, IReadOnlyList<Finding> findings) = workshop.ReadCase(_folder);
         if (read is null)
         {

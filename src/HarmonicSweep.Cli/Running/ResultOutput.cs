@@ -35,18 +35,32 @@ internal sealed class ResultOutput(CaseFile caseFile, StudyRequest request, Stud
     /// <returns>What a reader of the plots must know.</returns>
     public IReadOnlyList<Finding> Store(ResultFolder target, string folder, TextWriter writer, DrawPlots drawPlots, CancellationToken cancellation)
     {
-        target.WriteTables(caseFile, result);
-        target.WriteText("summary.txt", text => TextReport.Write(text, View()));
-        IReadOnlyList<Finding> remarks = drawPlots(caseFile, request, result, target.StagingFolder, cancellation);
-        cancellation.ThrowIfCancellationRequested();
-        IReadOnlyList<string> files = target.Commit(caseFile, result, HsweepCommand.Version);
+        // the tables and the document are written while the plots are drawn
+        Task<IReadOnlyList<Finding>> plots = Task.Run(() => drawPlots(caseFile, request, result, target.StagingFolder, cancellation), CancellationToken.None);
+        IReadOnlyList<string> files;
+        try
+        {
+            target.WriteTables(caseFile, result);
+            target.WriteText("summary.txt", text => TextReport.Write(text, View()));
+            files = target.Commit(caseFile, result, HsweepCommand.Version, () =>
+            {
+                plots.GetAwaiter().GetResult();
+                cancellation.ThrowIfCancellationRequested();
+            });
+        }
+        finally
+        {
+            // the folder is cleared by whoever opened it: nobody may still be writing there
+            Task.WaitAny([plots], CancellationToken.None);
+        }
+
         Headline.Write(writer, View());
         writer.WriteLine();
         IEnumerable<string> kinds = files.GroupBy(f => Path.GetExtension(f).TrimStart('.'), StringComparer.Ordinal)
             .OrderBy(g => g.Key, StringComparer.Ordinal)
             .Select(g => Invariant($"{g.Count()} {g.Key}"));
         writer.WriteLine(Invariant($"Wrote {files.Count} files to {folder} ({string.Join(", ", kinds)}); start with summary.txt."));
-        return remarks;
+        return plots.GetAwaiter().GetResult();
     }
 
     private ReportView View() => new(caseFile, request, result, command);

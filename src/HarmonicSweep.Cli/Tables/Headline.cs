@@ -114,7 +114,7 @@ internal static class Headline
         }
 
         parts.Add($"{Format.Count(view.Case.Assumed.Count, "value")} assumed");
-        double backwardError = view.Result.States.Select(s => s.WorstBackwardError).DefaultIfEmpty().Max();
+        double backwardError = view.Result.States.Select(s => s.WorstBackwardError).Append(view.Result.Screen?.WorstBackwardError ?? 0).Max();
         if (backwardError > 0)
         {
             parts.Add($"worst backward error {Format.Number(backwardError, 2)}");

@@ -26,17 +26,22 @@ internal static class TrustTables
         }
     }
 
-    /// <summary>One row a check, in the state where it differs most; elsewhere than in check only those that differ too much.</summary>
+    /// <summary>
+    /// One row a check, in the state where it differs most; elsewhere than in check the worst of each kind, and every one that
+    /// differs too much.
+    /// </summary>
     private static void HandChecks(TextWriter writer, ReportView view)
     {
         bool all = view.Command == "check";
+        var worst = view.All(s => s.HandChecks).GroupBy(c => (c.Row.Name, c.Row.Subject)).Select(g => g.MaxBy(c => c.Row.RelativeDifference)).ToList();
+        var ofKind = worst.GroupBy(c => c.Row.Name).Select(g => g.MaxBy(c => c.Row.RelativeDifference)).ToHashSet();
         InState<HandCheck>[] shown =
         [
-            .. view.All(s => s.HandChecks).GroupBy(c => (c.Row.Name, c.Row.Subject)).Select(g => g.MaxBy(c => c.Row.RelativeDifference))
-                .Where(c => all || !c.Row.Agrees).OrderBy(c => c.Row.Agrees).ThenByDescending(c => c.Row.RelativeDifference),
+            .. worst.Where(c => all || !c.Row.Agrees || ofKind.Contains(c))
+                .OrderBy(c => c.Row.Agrees).ThenByDescending(c => c.Row.RelativeDifference),
         ];
         TextTable.Write(
-            writer, all ? "Hand checks, each in the state where it differs most" : "Hand checks that differ", shown, view.RowLimit,
+            writer, all ? "Hand checks, each in the state where it differs most" : "Hand checks, the largest difference of each kind", shown, view.RowLimit,
             new("check", c => c.Row.Name, Left: true),
             new("of", c => c.Row.Subject, Left: true),
             new("by hand", c => Format.Number(c.Row.Hand, 5)),

@@ -9,23 +9,20 @@ internal static class DistortionPicture
     private const int MostRows = 32;
     private const float RowHeight = 30;
 
-    /// <summary>One picture, or several when there are more buses than a page has rows.</summary>
+    /// <summary>One picture; with more buses than it has rows, the worst ones and the PCC.</summary>
     public static IEnumerable<Picture> Plan(PictureContext context)
     {
-        BusThd[] rows = [.. BusThd.All(context)];
-        if (rows.All(r => r.Percent.All(p => p is null or 0)))
+        BusThd[] all = [.. BusThd.All(context)];
+        if (all.All(r => r.Percent.All(p => p is null or 0)))
         {
             yield break;
         }
 
-        BusThd[][] pages = [.. rows.Chunk(MostRows)];
-        for (int page = 0; page < pages.Length; page++)
-        {
-            string part = pages.Length == 1 ? "" : FormattableString.Invariant($", part {page + 1} of {pages.Length}");
-            string title = "Voltage distortion (THD) by bus" + part;
-            BusThd[] here = pages[page];
-            yield return new Picture("thd", title, () => Draw(context, title, here));
-        }
+        var worst = all.OrderByDescending(r => r.Bus == context.Settings.PccBus).ThenByDescending(r => r.Percent.Max() ?? -1).Take(MostRows).ToHashSet();
+        BusThd[] rows = [.. all.Where(worst.Contains)];
+        string part = rows.Length == all.Length ? "" : FormattableString.Invariant($", the worst {rows.Length} of {all.Length}");
+        string title = "Voltage distortion (THD) by bus" + part;
+        yield return new Picture("thd", title, () => Draw(context, title, rows));
     }
 
     private static Page Draw(PictureContext context, string title, BusThd[] rows)

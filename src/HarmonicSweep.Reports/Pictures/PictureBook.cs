@@ -30,6 +30,17 @@ public static class PictureBook
     }
 
     /// <summary>
+    /// Loads the fonts and the drawing library on a thread of its own, while others are still reading and computing: the first
+    /// picture of a process costs ten times the second.
+    /// </summary>
+    public static void Warm() => ThreadPool.QueueUserWorkItem(static _ =>
+    {
+        var sample = new Page("", "", [new Panel(Look.Empty(20, 20, 20, 20), 60), Key.Of([new KeyEntry("warm", Look.Series[1])])]);
+        sample.ToPng();
+        sample.ToSvg();
+    });
+
+    /// <summary>
     /// Characters of the case's names that the embedded font cannot draw, each once: the SVG has them, a PNG shows a box
     /// for each. Worth a remark to the user.
     /// </summary>

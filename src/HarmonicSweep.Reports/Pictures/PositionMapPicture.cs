@@ -75,7 +75,7 @@ internal static class PositionMapPicture
         Axes.Orders(plot, from, to, labelled: last);
         plot.Axes.SetLimitsY(-0.5, shown.Length - 0.5);
         plot.HideGrid();
-        Axes.Injected(plot, map.InjectedOrders, from, to, numbered: true);
+        Axes.Injected(plot, map.InjectedOrders, from, to, numbered: true, shaded: true);
         BankPosition?[] positions = [.. shown.Select(i => PositionOf(screen, map, map.StepsIn[i]))];
         int RowOf(int i) => shown.Length - 1 - i;
         plot.Axes.Left.TickGenerator = Axes.Named(shown.Select((s, i) => ((double)RowOf(i), RowText(positions[i], map.StepsIn[s]))));

@@ -10,8 +10,10 @@ namespace HarmonicSweep.Studies;
 internal static class BackgroundGains
 {
     public static IReadOnlyList<BackgroundGain> Of(
-        Circuit circuit, StudyRequest request, IReadOnlyList<string> buses, double[] orders, int threads, CancellationToken cancellation)
+        Circuit circuit, StudyRequest request, IReadOnlyList<string> buses, double[] orders, int threads, CancellationToken cancellation,
+        out double worst)
     {
+        worst = 0;
         CircuitShunt[] supplies = [.. circuit.Shunts.Where(s => s.Element is Supply)];
         if (supplies.Length == 0)
         {
@@ -24,7 +26,7 @@ internal static class BackgroundGains
             gain[b] = new double?[orders.Length];
         }
 
-        Sweep.Run(circuit, [.. orders.Select(HarmonicOrder.Snap)], threads, cancellation, (solver, index) =>
+        worst = Sweep.Run(circuit, [.. orders.Select(HarmonicOrder.Snap)], threads, cancellation, (solver, index) =>
         {
             var injection = new Complex[circuit.Pattern.Size];
             foreach (CircuitShunt supply in supplies)

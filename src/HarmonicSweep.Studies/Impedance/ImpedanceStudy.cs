@@ -48,7 +48,8 @@ public static class ImpedanceStudy
         IReadOnlyList<ImpedanceCurve> curves = Curves(circuit, request, buses, orders, threads, cancellation, out double worstCurve);
         IReadOnlyList<Resonance> resonances = Resonances(
             circuit, request, buses, result.InjectedOrders, cancellation, out double worstResonance);
-        IReadOnlyList<BackgroundGain> gains = BackgroundGains.Of(circuit, request, buses, orders, threads, cancellation);
+        IReadOnlyList<BackgroundGain> gains = BackgroundGains.Of(
+            circuit, request, buses, orders, threads, cancellation, out double worstGain);
         IReadOnlyList<BankResonance> banks = BankResonances.Of(plant, resonances);
         return result with
         {
@@ -57,7 +58,7 @@ public static class ImpedanceStudy
             BankResonances = banks,
             HandChecks = [.. result.HandChecks, .. HandChecks.OfResonances(plant, banks)],
             Gains = gains,
-            WorstBackwardError = Math.Max(result.WorstBackwardError, Math.Max(worstCurve, worstResonance)),
+            WorstBackwardError = new[] { result.WorstBackwardError, worstCurve, worstResonance, worstGain }.Max(),
         };
     }
 

@@ -14,7 +14,7 @@ internal sealed record Extremum(double Order, bool IsPeak, Complex Impedance, do
 internal sealed class ResonanceFinder
 {
     /// <summary>An interval is halved while the middle of ln Z departs by more than this from the line between its neighbours.</summary>
-    private const double Bend = 0.004;
+    private const double Bend = 0.003;
 
     /// <summary>Halvings at most; a needle of quality factor 1e6 is resolved long before.</summary>
     private const int DeepestHalving = 18;

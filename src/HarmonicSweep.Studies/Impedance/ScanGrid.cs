@@ -7,18 +7,21 @@ namespace HarmonicSweep.Studies;
 /// </summary>
 /// <remarks>
 /// At a resonance of a lumped passive network the magnetic and electric energies are equal, so its quality factor is at
-/// most that of the least lossy inductive element. A half-power width is h/Q: the grid is no coarser than that, and
-/// <see cref="ResonanceFinder"/> refines it wherever the curve bends.
+/// most that of the least lossy inductive element. A half-power width is h/Q: the grid is no coarser than two of them, so
+/// that a resonance bends the curve of some three neighbours, and <see cref="ResonanceFinder"/> refines it there.
 /// </remarks>
 internal static class ScanGrid
 {
     /// <summary>Quality factors beyond this do not narrow the grid further; the refinement by curvature takes over.</summary>
-    private const double LargestQuality = 600;
+    private const double LargestQuality = 1000;
 
     /// <summary>Never coarser than this share of the order, nor than <see cref="WidestSpacing"/>.</summary>
     private const double SmallestQuality = 10;
 
     private const double WidestSpacing = 0.2;
+
+    /// <summary>Half-power widths between two orders.</summary>
+    private const double Widths = 2;
 
     /// <summary>Ascending orders from <paramref name="from"/> to <paramref name="to"/>, both included.</summary>
     public static double[] Orders(Circuit circuit, double from, double to)
@@ -29,7 +32,7 @@ internal static class ScanGrid
         {
             orders.Add(order);
             double quality = Math.Clamp(LargestInductiveQuality(circuit, order), SmallestQuality, LargestQuality);
-            order += Math.Min(order / quality, WidestSpacing);
+            order += Math.Min(Widths * order / quality, WidestSpacing);
         }
 
         orders.Add(to);

@@ -32,6 +32,7 @@ public static class ScreenStudy
             Positions = [.. positions.Select(p => p with { BusVoltageWithoutPercent = Without(positions, p) })],
             Worst = Worst(request, screened),
             Maps = request.Combinations ? [] : Maps(screened),
+            WorstBackwardError = screened.Select(s => s.WorstBackwardError).DefaultIfEmpty(0).Max(),
         };
     }
 
@@ -43,7 +44,7 @@ public static class ScreenStudy
     private static List<WorstValue> Worst(StudyRequest request, ScreenedState[] screened)
     {
         var worst = new List<WorstValue>();
-        foreach (Bus bus in request.Plant.Buses)
+        foreach (Bus bus in request.Plant.Buses.Where(b => request.Buses.Count == 0 || request.Buses.Contains(b.Name)))
         {
             IEnumerable<(double? Order, double Percent, string State)> values = screened.SelectMany(
                 s => s.BusPercent.Where(v => v.Bus == bus.Name).Select(v => (v.Order, v.Percent, s.Name)));

@@ -6,8 +6,8 @@ namespace HarmonicSweep.Studies;
 /// <summary>What screening keeps of one solved state.</summary>
 internal sealed record ScreenedState
 {
-    /// <summary>Columns of the heat map at most: more than a picture can show serves nobody.</summary>
-    private const int MostMapColumns = 480;
+    /// <summary>Columns of the heat map at most: a fifth of an order up to 50; the resonances themselves are refined apart.</summary>
+    private const int MostMapColumns = 246;
 
     public required ScreenJob Job { get; init; }
 
@@ -24,6 +24,8 @@ internal sealed record ScreenedState
 
     public required IReadOnlyList<Complex?> MapOhm { get; init; }
 
+    public required double WorstBackwardError { get; init; }
+
     /// <summary>Solves one state and looks at the banks moved in it.</summary>
     public static ScreenedState Of(ScreenJob job, StudyRequest request, CancellationToken cancellation)
     {
@@ -33,7 +35,7 @@ internal sealed record ScreenedState
         IReadOnlyList<double> injected = InjectedOrders.Of(plant, powerFlow);
         Circuit circuit = Circuit.Build(plant, CircuitScope.Harmonic);
         string[] buses = [.. job.Moved.Select(m => m.Bank.Bus).Distinct(StringComparer.Ordinal)];
-        IReadOnlyList<Resonance> resonances = ImpedanceStudy.Resonances(circuit, request, buses, injected, cancellation, out _);
+        IReadOnlyList<Resonance> resonances = ImpedanceStudy.Resonances(circuit, request, buses, injected, cancellation, out double worstResonance);
         double[] mapOrders = request.Combinations ? [] : MapOrdersOf(request);
         return new ScreenedState
         {
@@ -43,7 +45,8 @@ internal sealed record ScreenedState
             BusPercent = Percentages(request, solution),
             Injected = injected,
             MapOrders = mapOrders,
-            MapOhm = Curve(circuit, buses[0], mapOrders, cancellation),
+            MapOhm = Curve(circuit, buses[0], mapOrders, cancellation, out double worstMap),
+            WorstBackwardError = Math.Max(solution.WorstBackwardError, Math.Max(worstResonance, worstMap)),
         };
     }
 
@@ -116,13 +119,14 @@ internal sealed record ScreenedState
         return [.. Enumerable.Range(0, count + 1).Select(i => (range.FromHz + (range.ToHz - range.FromHz) * i / count) / fundamental)];
     }
 
-    private static Complex?[] Curve(Circuit circuit, string bus, double[] orders, CancellationToken cancellation)
+    private static Complex?[] Curve(Circuit circuit, string bus, double[] orders, CancellationToken cancellation, out double worst)
     {
         var ohm = new Complex?[orders.Length];
         int row = circuit.RowOf(bus);
+        worst = 0;
         if (row >= 0)
         {
-            Sweep.Run(circuit, orders, 1, cancellation, (solver, index) => ohm[index] = solver.Impedance(row, row));
+            worst = Sweep.Run(circuit, orders, 1, cancellation, (solver, index) => ohm[index] = solver.Impedance(row, row));
         }
 
         return ohm;

@@ -43,6 +43,7 @@ internal sealed class Hsweep
     {
         ReadCase = _ => _read,
         NewCase = folder => folder == "taken" ? new Finding(Severity.Error, "HS001", null, "taken is not empty.", "choose another.") : null,
+        WarmPlots = static () => { },
         DrawPlots = Draw,
         Check = Study("check"),
         Impedance = Study("impedance"),

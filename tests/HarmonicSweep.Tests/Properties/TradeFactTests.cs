@@ -130,4 +130,22 @@ public sealed class TradeFactTests
 
     private static Complex Current(StateResult result, string element, double order) =>
         result.Currents.Single(c => c.Element == element && c.Order == order).Ampere;
+
+    /// <summary>
+    /// A source without impedance has no admittance to enter: it is refused by name and never solved as a large number.
+    /// </summary>
+    [Theory]
+    [InlineData(double.PositiveInfinity)]
+    [InlineData(0)]
+    public void Bare_ideal_voltage_source_cannot_be_entered_by_inspection_and_is_reported(double shortCircuitMva)
+    {
+        Plant plant = PlantKit.Plant(50, [PlantKit.Bus("GRID", 20)], PlantKit.Supply("IDEAL", "GRID", shortCircuitMva));
+
+        CaseException refused = Assert.Throws<CaseException>(
+            () => Circuit.Build(new PlantInState(plant, OperatingState.Base), CircuitScope.Harmonic));
+
+        Finding finding = Assert.Single(refused.Findings);
+        Assert.Equal("HS201", finding.Id);
+        Assert.Contains("IDEAL has no impedance: an ideal voltage source has no admittance", finding.Message, StringComparison.Ordinal);
+    }
 }

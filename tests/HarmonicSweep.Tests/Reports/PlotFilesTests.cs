@@ -60,8 +60,10 @@ public sealed class PlotFilesTests : IDisposable
             Assert.Equal(PngSignature, png[..8]);
             XElement svg = XDocument.Load(Path.Combine(_folder, picture.FileName + ".svg")).Root!;
             double[] box = [.. svg.Attribute("viewBox")!.Value.Split(' ').Select(v => double.Parse(v, System.Globalization.CultureInfo.InvariantCulture))];
-            // IHDR holds width and height at bytes 16 and 20; a picture has two pixels a unit
-            Assert.Equal([0, 0, BinaryPrimitives.ReadInt32BigEndian(png.AsSpan(16)) / 2.0, BinaryPrimitives.ReadInt32BigEndian(png.AsSpan(20)) / 2.0], box);
+            // IHDR holds width and height at bytes 16 and 20; a picture has three pixels for two units
+            Assert.Equal([0, 0], box[..2]);
+            Assert.Equal(1.5 * box[2], BinaryPrimitives.ReadInt32BigEndian(png.AsSpan(16)));
+            Assert.Equal(Math.Ceiling(1.5 * box[3]), BinaryPrimitives.ReadInt32BigEndian(png.AsSpan(20)));
         }
     }
 

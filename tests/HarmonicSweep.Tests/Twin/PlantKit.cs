@@ -12,9 +12,7 @@ internal static class PlantKit
 
     public static Bus Bus(string name, double kv) => new(name, kv, Here);
 
-    /// <summary>
-    /// 
-    /// </summary>
+    /// <summary>A supply of one strength.</summary>
     /// <param name="mva">Maximum = minimum short-circuit power, MVA.</param>
     public static Supply Supply(string name, string bus, double mva, double xOverR = 10) => new()
     {

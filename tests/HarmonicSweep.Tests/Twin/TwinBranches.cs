@@ -39,9 +39,7 @@ internal static class TwinBranches
         return new[,] { { y, -y }, { -y, y } };
     }
 
-    /// <summary>
-    /// 
-    /// </summary>
+    /// <summary>The ideal ratio, the shift and the short-circuit impedance, as the model text has them.</summary>
     /// <param name="sequence">+1 positive, -1 negative sequence.</param>
     public static Complex[,] Transformer(PlantInState state, Transformer transformer, double h, int sequence)
     {
