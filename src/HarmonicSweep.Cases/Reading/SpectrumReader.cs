@@ -9,8 +9,10 @@ internal static class SpectrumReader
     public static Dictionary<string, Spectrum> Read(IReadOnlyList<Row> rows, List<AssumedValue> assumed)
     {
         var spectra = new Dictionary<string, Spectrum>(StringComparer.Ordinal);
+        var spellings = new Spellings();
         foreach (IGrouping<string, Row> group in rows.GroupBy(r => r.Text("spectrum")))
         {
+            spellings.Add(group.Key, group.First(), "spectrum");
             var lines = new SortedDictionary<double, SpectrumLine>();
             bool angleAssumed = false;
             foreach (Row row in group)

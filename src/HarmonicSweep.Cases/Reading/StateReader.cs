@@ -17,6 +17,7 @@ internal static class StateReader
         IReadOnlyList<Row> rows, IReadOnlyDictionary<string, PlantElement> elements, TableReader tables)
     {
         var states = new List<OperatingState> { OperatingState.Base };
+        var spellings = new Spellings();
         foreach (IGrouping<string, Row> group in rows.GroupBy(r => r.Text("state")))
         {
             Row first = group.First();
@@ -26,6 +27,7 @@ internal static class StateReader
                 continue;
             }
 
+            spellings.Add(group.Key, first, "state");
             var settings = new List<StateSetting>();
             foreach (Row row in group)
             {

@@ -6,7 +6,7 @@ namespace HarmonicSweep.Cases.Reading;
 /// <summary>Checks every cell of a table against its schema and hands on the rows that are sound.</summary>
 internal sealed class TableReader(FindingList findings, List<AssumedValue> assumed, List<SourceEntry> sources)
 {
-    private readonly Dictionary<string, string> _spellings = new(StringComparer.OrdinalIgnoreCase);
+    private readonly Spellings _spellings = new();
     private readonly Dictionary<string, string> _suggestions = new(StringComparer.Ordinal);
 
     /// <summary>Bus names, known once buses.csv is read; empty before.</summary>
@@ -45,7 +45,7 @@ internal sealed class TableReader(FindingList findings, List<AssumedValue> assum
             {
                 string name = naming >= 0 && naming < record.Cells.Length ? record.Cells[naming] : "";
                 LeftOut.Add((table.File, name));
-                if (table.Columns[0].Kind == CellKind.Name)
+                if (table.Columns[0].Kind == CellKind.Name && name.Length > 0)
                 {
                     Names.TryAdd(name, new SourceLocation(csv.File, record.Line));
                 }
@@ -155,12 +155,9 @@ internal sealed class TableReader(FindingList findings, List<AssumedValue> assum
                 Ids.RepeatedName, column.Name, $"the name '{cell}' is already taken at {Names[cell]}; expected a name that nothing else bears.",
                 "rename one of the two; buses and elements share their names.");
         }
-        else if (!_spellings.TryAdd(cell, cell))
+        else
         {
-            string other = _spellings[cell];
-            row.Warning(
-                Ids.LetterCase, column.Name, $"the names '{cell}' and '{other}' (at {Names[other]}) differ in capital letters only; they are two things.",
-                "rename one of the two, or spell both alike if they are one thing.");
+            _spellings.Add(cell, row, column.Name);
         }
     }
 

@@ -80,6 +80,10 @@ public class BankTests
         { "spectrum with an order twice", p => p.Append("spectra.csv", "six pulse,5.0000000001,3,0"),
             "spectra.csv(5,order): error HS042: spectrum six pulse has order 5.0000000001 twice. Fix: keep one of the lines."
         },
+        { "spectrum spelled in two ways", p => p.Append("spectra.csv", "Six pulse,7,3,0"),
+            "spectra.csv(5,spectrum): warning HS116: the names 'Six pulse' and 'six pulse' (spectra.csv(2)) differ in capital letters only; they are taken for two things. Fix: spell both alike if they are one thing, or rename one of the two.",
+            "spectra.csv(5): note HS115: spectrum Six pulse is used by nobody. Fix: nothing needs mending, unless a converter was meant to use it."
+        },
         { "order 0", p => p.Append("spectra.csv", "six pulse,0,3,0"),
             "spectra.csv(5,order): error HS011: order is 0; expected a number above 0 up to 1000. Fix: correct the value, or check which column it belongs to."
         },

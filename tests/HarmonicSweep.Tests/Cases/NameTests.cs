@@ -29,7 +29,7 @@ public class NameTests
             "motors.csv(2,name): error HS016: the name 'LIGHTS' is already taken at loads.csv(2); expected a name that nothing else bears. Fix: rename one of the two; buses and elements share their names."
         },
         { "names that differ in capitals", p => p.Append("loads.csv", "Lights,LV,20,0.9,,parallel,0,"),
-            "loads.csv(3,name): warning HS116: the names 'Lights' and 'LIGHTS' (at loads.csv(2)) differ in capital letters only; they are two things. Fix: rename one of the two, or spell both alike if they are one thing."
+            "loads.csv(3,name): warning HS116: the names 'Lights' and 'LIGHTS' (loads.csv(2)) differ in capital letters only; they are taken for two things. Fix: spell both alike if they are one thing, or rename one of the two."
         },
         { "bus twice", p => p.Append("buses.csv", "LV,0.69,"),
             "buses.csv(6,bus): error HS016: the name 'LV' is already taken at buses.csv(5); expected a name that nothing else bears. Fix: rename one of the two; buses and elements share their names."

@@ -79,6 +79,9 @@ public class StateTests
         { "in and out", p => p.Append("states.csv", "night,T1,in\nnight,T1,out"),
             "states.csv(5,setting): error HS028: state night sets T1 twice in the same way. Fix: keep one of the rows."
         },
+        { "state spelled in two ways", p => p.Append("states.csv", "Night,LIGHTS,out"),
+            "states.csv(4,state): warning HS116: the names 'Night' and 'night' (states.csv(3)) differ in capital letters only; they are taken for two things. Fix: spell both alike if they are one thing, or rename one of the two."
+        },
         { "blank cells", p => p.Append("states.csv", ",,") .Append("states.csv", "night,,out"),
             "states.csv(5,element): error HS009: element is blank; expected the name of an element of the plant. Fix: fill the cell in."
         },
