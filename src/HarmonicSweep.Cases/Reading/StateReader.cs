@@ -28,7 +28,7 @@ internal static class StateReader
             }
 
             spellings.Add(group.Key, first, "state");
-            var settings = new List<StateSetting>();
+            var settings = new List<(StateSetting Setting, Row Row)>();
             foreach (Row row in group)
             {
                 if (Setting(row, elements, tables) is not { } setting)
@@ -36,19 +36,32 @@ internal static class StateReader
                     continue;
                 }
 
-                if (settings.Any(s => s.Element == setting.Element && s.GetType() == setting.GetType()))
+                if (settings.Any(s => s.Setting.Element == setting.Element && s.Setting.GetType() == setting.GetType()))
                 {
                     row.Error(Ids.RepeatedSetting, "setting", $"state {group.Key} sets {setting.Element} twice in the same way.", "keep one of the rows.");
                     continue;
                 }
 
-                settings.Add(setting);
+                settings.Add((setting, row));
             }
 
-            states.Add(new OperatingState(group.Key, settings));
+            DoubtSettingsOfWhatIsOut(group.Key, settings);
+
+            states.Add(new OperatingState(group.Key, [.. settings.Select(s => s.Setting)]));
         }
 
         return states;
+    }
+
+    private static void DoubtSettingsOfWhatIsOut(string state, List<(StateSetting Setting, Row Row)> settings)
+    {
+        HashSet<string> outOfService = [.. settings.Where(s => s.Setting is ServiceSetting { In: false }).Select(s => s.Setting.Element)];
+        foreach ((StateSetting setting, Row row) in settings.Where(s => s.Setting is not ServiceSetting && outOfService.Contains(s.Setting.Element)))
+        {
+            row.Warning(
+                Ids.NoEffect, "setting", $"'{row.Text("setting").Shown()}' has no effect: state {state} takes {setting.Element} out.",
+                "keep one of the two rows.");
+        }
     }
 
     private static StateSetting? Setting(

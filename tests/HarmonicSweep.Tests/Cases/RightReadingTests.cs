@@ -17,7 +17,7 @@ public class RightReadingTests
         ["UTF-16 little end first"] = b => [0xFF, 0xFE, .. Encoding.Unicode.GetBytes(Encoding.UTF8.GetString(b))],
         ["UTF-16 big end first"] = b => [0xFE, 0xFF, .. Encoding.BigEndianUnicode.GetBytes(Encoding.UTF8.GetString(b))],
         ["line end at the end"] = b => Text(b, t => t + "\n"),
-        ["comments and blank lines"] = b => Text(b, t => "# first\n\n" + t.Replace("\n", "\n# between, with a comma\n\n", StringComparison.Ordinal) + "\n#last"),
+        ["comments and blank lines"] = b => Text(b, t => "# first\n\n" + t.Replace("\n", "\n# 5\" between, with a \"comma\n\n", StringComparison.Ordinal) + "\n#last"),
     };
 
     private static readonly Dictionary<string, Func<string, string>> Tables = new(StringComparer.Ordinal)

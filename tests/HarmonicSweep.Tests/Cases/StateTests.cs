@@ -82,6 +82,9 @@ public class StateTests
         { "state spelled in two ways", p => p.Append("states.csv", "Night,LIGHTS,out"),
             "states.csv(4,state): warning HS116: the names 'Night' and 'night' (states.csv(3)) differ in capital letters only; they are taken for two things. Fix: spell both alike if they are one thing, or rename one of the two."
         },
+        { "setting of what is out", p => p.Append("states.csv", "night,BANK,out"),
+            "states.csv(3,setting): warning HS117: 'steps=2' has no effect: state night takes BANK out. Fix: keep one of the two rows."
+        },
         { "blank cells", p => p.Append("states.csv", ",,") .Append("states.csv", "night,,out"),
             "states.csv(5,element): error HS009: element is blank; expected the name of an element of the plant. Fix: fill the cell in."
         },
