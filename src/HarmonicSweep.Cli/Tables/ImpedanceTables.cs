@@ -8,11 +8,15 @@ namespace HarmonicSweep.Cli;
 /// <summary>Resonances, the hand formula of every bank, and impedances at whole or asked-for orders.</summary>
 internal static class ImpedanceTables
 {
+    /// <summary>Columns of injected orders in the table of gains.</summary>
+    private const int OrdersOfGain = 4;
+
     /// <summary>Writes them.</summary>
     public static void Write(TextWriter writer, ReportView view)
     {
         Resonances(writer, view);
         Banks(writer, view);
+        Gains(writer, view);
         if (view.IsStudy)
         {
             return;
@@ -48,6 +52,31 @@ internal static class ImpedanceTables
         {
             writer.WriteLine($"  Near a resonance the load model decides the height (loads here: {models}); try another before trusting a peak.");
         }
+    }
+
+    /// <summary>Gains, the largest first, at their largest and at the first injected orders.</summary>
+    private static void Gains(TextWriter writer, ReportView view)
+    {
+        InState<BackgroundGain>[] rows = [.. view.All(s => s.Gains).Where(g => g.Row.Gain.Any(v => v is not null)).OrderByDescending(g => g.Row.Gain.Max())];
+        double[] orders = [.. view.Result.States.SelectMany(s => s.InjectedOrders).Distinct().Order().Take(OrdersOfGain)];
+        TextTable.Write(
+            writer, $"Gain from a background voltage at {rows.FirstOrDefault().Row?.From}, largest first: V bus/V background, 1 = as the utility delivers it",
+            rows, view.IsStudy ? view.RowLimit : view.Plant.Buses.Count,
+            [
+                new("state", g => g.State, Left: true),
+                new("bus", g => g.Row.Bus, Left: true),
+                new("largest", g => Format.Number(g.Row.Gain.Max(), 3)),
+                new("at order", g => Format.Number(OrderOfLargest(g.Row))),
+                .. orders.Select(h => new TextColumn<InState<BackgroundGain>>($"h = {Format.GivenOrder(h)}", g => Format.Number(GainAt(g.Row, h), 3))),
+            ]);
+    }
+
+    private static double OrderOfLargest(BackgroundGain gain) => gain.Orders[gain.Gain.ToList().IndexOf(gain.Gain.Max())];
+
+    private static double? GainAt(BackgroundGain gain, double order)
+    {
+        int at = gain.Orders.ToList().IndexOf(order);
+        return at < 0 ? null : gain.Gain[at];
     }
 
     private static string LoadModels(Plant plant) => string.Join(

@@ -5,15 +5,20 @@ namespace HarmonicSweep.Studies;
 
 /// <summary>
 /// What the plant does to a background voltage: |V_bus/E|, both per unit of nominal, with the EMF E behind the impedance
-/// of every supply in service, which is the voltage that stands at the PCC while the plant is off.
+/// of every supply in service, which is the voltage that stands at the PCC while the plant is off. Every bus, unless some
+/// are asked for; the injected orders are points of the curve whatever its spacing.
 /// </summary>
 internal static class BackgroundGains
 {
     public static IReadOnlyList<BackgroundGain> Of(
-        Circuit circuit, StudyRequest request, IReadOnlyList<string> buses, double[] orders, int threads, CancellationToken cancellation,
+        Circuit circuit, StudyRequest request, double[] scanned, IReadOnlyList<double> injected, int threads, CancellationToken cancellation,
         out double worst)
     {
         worst = 0;
+        IReadOnlyList<string> buses = request.Buses.Count > 0 ? request.Buses : [.. request.Plant.Buses.Select(b => b.Name)];
+        double[] orders = request.Orders.Count > 0
+            ? scanned
+            : [.. scanned.Concat(injected.Where(h => h >= scanned[0] && h <= scanned[^1])).Distinct().Order()];
         CircuitShunt[] supplies = [.. circuit.Shunts.Where(s => s.Element is Supply)];
         if (supplies.Length == 0)
         {

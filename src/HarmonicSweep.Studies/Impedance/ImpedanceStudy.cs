@@ -49,7 +49,7 @@ public static class ImpedanceStudy
         IReadOnlyList<Resonance> resonances = Resonances(
             circuit, request, buses, result.InjectedOrders, cancellation, out double worstResonance);
         IReadOnlyList<BackgroundGain> gains = BackgroundGains.Of(
-            circuit, request, buses, orders, threads, cancellation, out double worstGain);
+            circuit, request, orders, result.InjectedOrders, threads, cancellation, out double worstGain);
         IReadOnlyList<BankResonance> banks = BankResonances.Of(plant, resonances);
         return result with
         {
