@@ -8,10 +8,13 @@ internal static class GainPicture
 {
     private const float Height = 340;
 
+    /// <summary>Curves nowhere further apart than this share of their highest point cannot be told apart.</summary>
+    private const double SameCurve = 0.02;
+
     /// <summary>One picture when there are gains.</summary>
     public static IEnumerable<Picture> Plan(PictureContext context)
     {
-        StateResult? state = context.Result.States.FirstOrDefault(s => s.Gains.Any(g => g.Orders.Count > 1 && g.Gain.Any(v => v is not null)));
+        StateResult? state = context.Result.States.FirstOrDefault(s => s.Gains.Any(g => g.Orders.Count > 1 && g.Gain.Any(v => v > 0)));
         if (state is not null)
         {
             string title = $"Gain from a background voltage at {context.BusText(state.Gains[0].From)}";
@@ -21,10 +24,7 @@ internal static class GainPicture
 
     private static Page Draw(PictureContext context, string title, StateResult state)
     {
-        BackgroundGain[] drawn =
-        [
-            .. state.Gains.Where(g => g.Gain.Any(v => v is not null)).OrderByDescending(g => g.Gain.Max() ?? 0).Take(Look.Series.Length),
-        ];
+        BackgroundGain[] drawn = [.. Distinct(context, state.Gains.Where(g => g.Gain.Any(v => v > 0))).Take(Look.Series.Length)];
         double from = drawn[0].Orders[0];
         double to = drawn[0].Orders[^1];
         Plot plot = Look.Empty(72, 20, 46, Axes.InjectedRoom);
@@ -43,11 +43,42 @@ internal static class GainPicture
         var entries = drawn.Select((g, i) => new KeyEntry($"{context.BusText(g.Bus)}:  largest {Largest(g)}", Look.Series[i])).ToList();
         if (drawn.Length < state.Gains.Count)
         {
-            entries.Add(new KeyEntry(FormattableString.Invariant($"{drawn.Length} of {state.Gains.Count} buses drawn: those with the highest gain; the tables have all")));
+            entries.Add(new KeyEntry(FormattableString.Invariant($"{drawn.Length} of {state.Gains.Count} buses drawn: the PCC, the banks' and those unlike them; the tables have all")));
         }
 
         string subtitle = $"{context.CaseTitle} · state {state.State} · 1 = as the utility delivers it · dashed: injected orders";
         return new Page(title, subtitle, [new Panel(plot, Height), Key.Of(entries)]);
+    }
+
+    /// <summary>The PCC and the buses of banks first, then the highest gains; a curve that lies on another one is left out.</summary>
+    private static List<BackgroundGain> Distinct(PictureContext context, IEnumerable<BackgroundGain> gains)
+    {
+        var chosen = new List<BackgroundGain>();
+        foreach (BackgroundGain gain in gains
+            .OrderByDescending(g => g.Bus == context.Settings.PccBus || context.Buses.Contains(g.Bus))
+            .ThenByDescending(g => g.Gain.Max()))
+        {
+            if (!chosen.Exists(c => Coincide(c, gain)))
+            {
+                chosen.Add(gain);
+            }
+        }
+
+        return chosen;
+    }
+
+    private static bool Coincide(BackgroundGain a, BackgroundGain b)
+    {
+        double largest = a.Gain.Max() ?? 0;
+        for (int i = 0; i < a.Gain.Count; i++)
+        {
+            if (!(Math.Abs((a.Gain[i] ?? 0) - (b.Gain[i] ?? 0)) <= SameCurve * largest))
+            {
+                return false;
+            }
+        }
+
+        return true;
     }
 
     private static string Largest(BackgroundGain gain)
