@@ -13,18 +13,19 @@ internal static class SpectrumReader
         foreach (IGrouping<string, Row> group in rows.GroupBy(r => r.Text("spectrum")))
         {
             spellings.Add(group.Key, group.First(), "spectrum");
-            var lines = new SortedDictionary<double, SpectrumLine>();
+            var lines = new List<SpectrumLine>();
             bool angleAssumed = false;
             foreach (Row row in group)
             {
                 double order = HarmonicOrder.Snap(row.Number("order"));
                 double percent = row.Number("percent");
                 angleAssumed |= !row.Has("angle_deg");
-                if (!lines.TryAdd(order, new SpectrumLine(order, percent, row.Find("angle_deg") ?? 0)))
+                if (lines.Exists(l => l.Order == order))
                 {
                     row.Error(Ids.RepeatedOrder, "order", $"spectrum {group.Key} has order {row.Text("order")} twice.", "keep one of the lines.");
                 }
 
+                lines.Add(new SpectrumLine(order, percent, row.Find("angle_deg") ?? 0));
                 if (percent > 100)
                 {
                     row.Warning(
@@ -38,7 +39,8 @@ internal static class SpectrumReader
                 assumed.Add(new AssumedValue(group.Key, "angle_deg", "0 degrees", "no angle given for some line of the spectrum"));
             }
 
-            spectra[group.Key] = new Spectrum(group.Key, [.. lines.Values], group.First().Location);
+            lines.Sort(static (a, b) => a.Order.CompareTo(b.Order));
+            spectra[group.Key] = new Spectrum(group.Key, lines, group.First().Location);
         }
 
         return spectra;

@@ -60,7 +60,7 @@ internal static class ImpedanceTables
         InState<BackgroundGain>[] rows = [.. view.All(s => s.Gains).Where(g => g.Row.Gain.Any(v => v is not null)).OrderByDescending(g => g.Row.Gain.Max())];
         double[] orders = [.. view.Result.States.SelectMany(s => s.InjectedOrders).Distinct().Order().Take(OrdersOfGain)];
         TextTable.Write(
-            writer, $"Gain from a background voltage at {rows.FirstOrDefault().Row?.From}, largest first: V bus/V background, 1 = as the utility delivers it",
+            writer, $"Gain from a background voltage at {rows.FirstOrDefault()?.Row.From}, largest first: V bus/V background, 1 = as the utility delivers it",
             rows, view.IsStudy ? view.RowLimit : view.Plant.Buses.Count,
             [
                 new("state", g => g.State, Left: true),

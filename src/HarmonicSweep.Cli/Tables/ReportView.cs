@@ -63,8 +63,8 @@ internal sealed record ReportView(CaseFile Case, StudyRequest Request, StudyResu
     ];
 }
 
-/// <summary>A row of a state.</summary>
+/// <summary>A row of a state. A class: generic code over structures would be compiled anew at every start.</summary>
 /// <typeparam name="T">The row.</typeparam>
 /// <param name="State">Name of the state.</param>
 /// <param name="Row">The row.</param>
-internal readonly record struct InState<T>(string State, T Row);
+internal sealed record InState<T>(string State, T Row);

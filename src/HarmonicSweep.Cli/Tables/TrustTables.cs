@@ -33,8 +33,8 @@ internal static class TrustTables
     private static void HandChecks(TextWriter writer, ReportView view)
     {
         bool all = view.Command == "check";
-        var worst = view.All(s => s.HandChecks).GroupBy(c => (c.Row.Name, c.Row.Subject)).Select(g => g.MaxBy(c => c.Row.RelativeDifference)).ToList();
-        var ofKind = worst.GroupBy(c => c.Row.Name).Select(g => g.MaxBy(c => c.Row.RelativeDifference)).ToHashSet();
+        var worst = view.All(s => s.HandChecks).GroupBy(c => (c.Row.Name, c.Row.Subject)).Select(g => g.MaxBy(c => c.Row.RelativeDifference)!).ToList();
+        var ofKind = worst.GroupBy(c => c.Row.Name).Select(g => g.MaxBy(c => c.Row.RelativeDifference)!).ToHashSet();
         InState<HandCheck>[] shown =
         [
             .. worst.Where(c => all || !c.Row.Agrees || ofKind.Contains(c))

@@ -57,7 +57,7 @@ public sealed record Spectrum(string Name, IReadOnlyList<SpectrumLine> Lines, So
 /// <param name="Order">Order h, any real number above 0.</param>
 /// <param name="Percent">Magnitude, percent of the fundamental (converter) or of nominal voltage (background).</param>
 /// <param name="AngleDeg">Angle, degrees.</param>
-public readonly record struct SpectrumLine(double Order, double Percent, double AngleDeg);
+public sealed record SpectrumLine(double Order, double Percent, double AngleDeg);
 
 /// <summary>A harmonic-producing load: constant power at the fundamental, a current source at every other order.</summary>
 public sealed record Converter : ShuntElement

@@ -34,7 +34,7 @@ internal static class RadialPaths
         {
             new("Z at order 1, supply alone", supply.Bus, Invariant($"V^2/S_sc = {kv:G5}^2/{mva:G5}"), kv * kv / mva, Computed(start), "ohm", tolerance),
         };
-        foreach ((int node, Complex sum, int elements) in Walk(plant, circuit, start, source))
+        foreach ((int node, _, Complex sum, int elements) in Walk(plant, circuit, start, source))
         {
             checks.Add(new HandCheck(
                 "Z at order 1, radial path", circuit.Nodes.BusesOf(node)[0],
@@ -45,12 +45,15 @@ internal static class RadialPaths
         return checks;
     }
 
+    /// <summary>A node reached, the branch it was reached by (-1 at the start), the sum of impedances and the elements so far.</summary>
+    private sealed record Place(int Node, int Came, Complex Sum, int Elements);
+
     /// <summary>Nodes whose only path to the start is a chain of single branches, with the sum of impedances along it.</summary>
-    private static List<(int Node, Complex Sum, int Elements)> Walk(PlantInState plant, Circuit circuit, int start, Complex source)
+    private static List<Place> Walk(PlantInState plant, Circuit circuit, int start, Complex source)
     {
-        var reached = new List<(int, Complex, int)>();
-        var queue = new Queue<(int Node, int Came, Complex Sum, int Elements)>([(start, -1, source, 0)]);
-        while (queue.TryDequeue(out var at))
+        var reached = new List<Place>();
+        var queue = new Queue<Place>([new Place(start, -1, source, 0)]);
+        while (queue.TryDequeue(out Place? at))
         {
             for (int i = 0; i < circuit.Branches.Count; i++)
             {
@@ -64,8 +67,9 @@ internal static class RadialPaths
                 bool down = branch.NodeA == at.Node;
                 int next = down ? branch.NodeB : branch.NodeA;
                 Complex sum = Through(plant, branch.Element, down, at.Sum);
-                reached.Add((next, sum, at.Elements + 1));
-                queue.Enqueue((next, i, sum, at.Elements + 1));
+                var place = new Place(next, i, sum, at.Elements + 1);
+                reached.Add(place);
+                queue.Enqueue(place);
             }
         }
 
